@@ -1,0 +1,5 @@
+/** Placeholder. */
+@NullMarked
+package org.seamwatch.ops;
+
+import org.jspecify.annotations.NullMarked;

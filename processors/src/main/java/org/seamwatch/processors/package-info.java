@@ -1,0 +1,5 @@
+/** Placeholder. */
+@NullMarked
+package org.seamwatch.processors;
+
+import org.jspecify.annotations.NullMarked;

@@ -1,0 +1,5 @@
+/** Placeholder. */
+@NullMarked
+package org.seamwatch.schemas;
+
+import org.jspecify.annotations.NullMarked;

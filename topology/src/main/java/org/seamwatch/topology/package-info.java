@@ -1,0 +1,5 @@
+/** Placeholder. */
+@NullMarked
+package org.seamwatch.topology;
+
+import org.jspecify.annotations.NullMarked;
