@@ -4,14 +4,12 @@ import java.util.List;
 
 /** A statistic that a series can have. */
 public enum StatisticName {
-    MORAN("moran", List.of(new ChartPlan.Ewma(0.2, 1, Sides.UPPER)));
+    MORAN("moran");
 
     private final String word;
-    private final List<ChartPlan> defaultCharts;
 
-    StatisticName(String word, List<ChartPlan> defaultCharts) {
+    StatisticName(String word) {
         this.word = word;
-        this.defaultCharts = defaultCharts;
     }
 
     /** The word in plan and records. */
@@ -21,6 +19,8 @@ public enum StatisticName {
 
     /** Its charts where the plan gives none. */
     public List<ChartPlan> defaultCharts() {
-        return defaultCharts;
+        return switch (this) {
+            case MORAN -> List.of(new ChartPlan.Ewma(0.2, 1, Sides.UPPER));
+        };
     }
 }
