@@ -41,4 +41,10 @@ public record SeriesDay(
     public SeriesDay at(int newRevision, Instant newClosedAt) {
         return new SeriesDay(version, series, day, newRevision, newClosedAt, cases, regions, isolated, unjudged, moran);
     }
+
+    /** The same day with its Moran's I. */
+    public SeriesDay withMoran(MoranDay newMoran) {
+        return new SeriesDay(
+                version, series, day, revision, closedAt, cases, regions, isolated, unjudged, newMoran);
+    }
 }

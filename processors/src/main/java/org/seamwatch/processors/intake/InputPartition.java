@@ -1,0 +1,77 @@
+package org.seamwatch.processors.intake;
+
+import org.jspecify.annotations.Nullable;
+import org.seamwatch.processors.flow.Hours;
+import org.seamwatch.processors.flow.InputSizes;
+import org.seamwatch.processors.flow.SeriesMessage.Watermark;
+import org.seamwatch.processors.state.Shelf;
+
+/**
+ * What every input partition does, whatever it carries: its time is the greatest timestamp it has seen, it promises the
+ * hours it has passed, and it accounts for everything.
+ */
+final class InputPartition {
+
+    /** What has to be said of an hour before its watermark. */
+    @FunctionalInterface
+    interface HourEnd {
+        void passed(long hour);
+    }
+
+    private final String topic;
+    private final int partition;
+    private final InputSizes sizes;
+    private final Shelf accounts;
+    private final IntakeOutput out;
+    private final Account account;
+
+    InputPartition(String topic, int partition, InputSizes sizes, Shelf accounts, IntakeOutput out) {
+        this.topic = topic;
+        this.partition = partition;
+        this.sizes = sizes;
+        this.accounts = accounts;
+        this.out = out;
+        byte @Nullable [] row = accounts.get(key(topic, partition));
+        this.account = row == null ? new Account() : Account.from(row);
+    }
+
+    static String key(String topic, int partition) {
+        return topic + "|" + partition;
+    }
+
+    /** Moves time on to a record; where that enters a new hour, ends the hour before and sends the watermark. */
+    void enter(LogRecord record, HourEnd end) {
+        long before = account.time();
+        account.read(record.timestamp());
+        long hour = hour();
+        if (before < 0 || Hours.of(before) < hour) {
+            if (before >= 0) {
+                end.passed(Hours.of(before));
+            }
+            out.toAll(new Watermark(topic, partition, hour - 1, account.firstTimestamp(), sizes));
+        }
+    }
+
+    /** The hour of the partition's time. */
+    long hour() {
+        return Hours.of(account.time());
+    }
+
+    /** The partition's time, milliseconds since 1970-01-01T00Z. */
+    long time() {
+        return account.time();
+    }
+
+    Account account() {
+        return account;
+    }
+
+    void reject(LogRecord record, Refusal why) {
+        account.reject(why.reason().code());
+        out.reject(Rejection.of(record, Hours.endMillis(hour()), why));
+    }
+
+    void save() {
+        accounts.put(key(topic, partition), account.row());
+    }
+}

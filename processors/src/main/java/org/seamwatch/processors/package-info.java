@@ -1,5 +1,0 @@
-/** Placeholder. */
-@NullMarked
-package org.seamwatch.processors;
-
-import org.jspecify.annotations.NullMarked;
