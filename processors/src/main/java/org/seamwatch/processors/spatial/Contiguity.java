@@ -1,5 +1,6 @@
 package org.seamwatch.processors.spatial;
 
+import java.util.ArrayDeque;
 import java.util.List;
 import org.locationtech.jts.geom.Geometry;
 
@@ -78,5 +79,33 @@ public final class Contiguity {
             }
         }
         return lists.toArrays();
+    }
+
+    /**
+     * Number of connected pieces; an isolated region is one.
+     *
+     * @param neighbours symmetric neighbour lists
+     */
+    public static int pieces(int[][] neighbours) {
+        boolean[] seen = new boolean[neighbours.length];
+        ArrayDeque<Integer> open = new ArrayDeque<>();
+        int pieces = 0;
+        for (int start = 0; start < neighbours.length; start++) {
+            if (seen[start]) {
+                continue;
+            }
+            pieces++;
+            seen[start] = true;
+            open.add(start);
+            while (!open.isEmpty()) {
+                for (int j : neighbours[open.remove()]) {
+                    if (!seen[j]) {
+                        seen[j] = true;
+                        open.add(j);
+                    }
+                }
+            }
+        }
+        return pieces;
     }
 }

@@ -11,6 +11,8 @@ final class FoldedWeights {
     private final int[] offsets;
     private final int[] columns;
     private final double[] values;
+
+    /** The value that all pairs share, as they do with binary weights of symmetric neighbours; NaN if they do not. */
     private final double common;
 
     private FoldedWeights(int[] offsets, int[] columns, double[] values) {
@@ -20,30 +22,28 @@ final class FoldedWeights {
         this.common = commonValue(values);
     }
 
-    /** Folds the rows given; each row's columns must be sorted. */
-    static FoldedWeights of(int[] offsets, int[] columns, double[] values) {
-        int n = offsets.length - 1;
-        Transposed transposed = Transposed.of(offsets, columns, values);
-        int[] folded = new int[n + 1];
-        int[] pairColumns = new int[columns.length];
-        double[] pairValues = new double[columns.length];
+    static FoldedWeights of(SparseRows w) {
+        SparseRows t = w.transposed();
+        int[] offsets = new int[w.size() + 1];
+        int[] columns = new int[w.columns.length];
+        double[] values = new double[w.columns.length];
         int size = 0;
-        for (int i = 0; i < n; i++) {
-            int a = offsets[i];
-            int b = transposed.offsets[i];
-            while (a < offsets[i + 1] || b < transposed.offsets[i + 1]) {
-                int columnA = a < offsets[i + 1] ? columns[a] : Integer.MAX_VALUE;
-                int columnB = b < transposed.offsets[i + 1] ? transposed.columns[b] : Integer.MAX_VALUE;
+        for (int i = 0; i < w.size(); i++) {
+            int a = w.offsets[i];
+            int b = t.offsets[i];
+            while (a < w.offsets[i + 1] || b < t.offsets[i + 1]) {
+                int columnA = a < w.offsets[i + 1] ? w.columns[a] : Integer.MAX_VALUE;
+                int columnB = b < t.offsets[i + 1] ? t.columns[b] : Integer.MAX_VALUE;
                 int column = Math.min(columnA, columnB);
-                double value = (columnA == column ? values[a++] : 0) + (columnB == column ? transposed.values[b++] : 0);
+                double value = (columnA == column ? w.values[a++] : 0) + (columnB == column ? t.values[b++] : 0);
                 if (column > i) {
-                    pairColumns[size] = column;
-                    pairValues[size++] = value;
+                    columns[size] = column;
+                    values[size++] = value;
                 }
             }
-            folded[i + 1] = size;
+            offsets[i + 1] = size;
         }
-        return new FoldedWeights(folded, Arrays.copyOf(pairColumns, size), Arrays.copyOf(pairValues, size));
+        return new FoldedWeights(offsets, Arrays.copyOf(columns, size), Arrays.copyOf(values, size));
     }
 
     /** {@code sum_ij w_ij z_i z_j}. */
@@ -86,7 +86,6 @@ final class FoldedWeights {
         return sum;
     }
 
-    /** The value all pairs share, or NaN. */
     private static double commonValue(double[] values) {
         for (double value : values) {
             if (value != values[0]) {
@@ -94,41 +93,5 @@ final class FoldedWeights {
             }
         }
         return values.length == 0 ? 0 : values[0];
-    }
-
-    /** Columns as rows; filled in row order, so each of its rows is sorted. */
-    private static final class Transposed {
-
-        private final int[] offsets;
-        private final int[] columns;
-        private final double[] values;
-
-        private Transposed(int[] offsets, int[] columns, double[] values) {
-            this.offsets = offsets;
-            this.columns = columns;
-            this.values = values;
-        }
-
-        static Transposed of(int[] offsets, int[] columns, double[] values) {
-            int n = offsets.length - 1;
-            int[] starts = new int[n + 1];
-            for (int column : columns) {
-                starts[column + 1]++;
-            }
-            for (int i = 0; i < n; i++) {
-                starts[i + 1] += starts[i];
-            }
-            int[] next = starts.clone();
-            int[] rows = new int[columns.length];
-            double[] weights = new double[columns.length];
-            for (int i = 0; i < n; i++) {
-                for (int k = offsets[i]; k < offsets[i + 1]; k++) {
-                    int at = next[columns[k]]++;
-                    rows[at] = i;
-                    weights[at] = values[k];
-                }
-            }
-            return new Transposed(starts, rows, weights);
-        }
     }
 }
