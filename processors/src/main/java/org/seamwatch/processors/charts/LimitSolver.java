@@ -25,13 +25,12 @@ public final class LimitSolver {
      * @throws IllegalArgumentException when no limit above zero has that probability
      */
     public static double individuals(Sides sides, double falseAlarmsPerYear) {
-        double tails = sides == Sides.UPPER ? 1 : 2;
-        double most = YEAR * tails / 2;
+        double most = YEAR / shortest(sides);
         if (!(falseAlarmsPerYear > 0 && falseAlarmsPerYear < most)) {
             throw new IllegalArgumentException("false alarms a year of an individuals chart must be above 0 and below "
                     + most + ", were " + falseAlarmsPerYear);
         }
-        return NormalScore.upperQuantile(falseAlarmsPerYear / YEAR / tails);
+        return NormalScore.upperQuantile(falseAlarmsPerYear / YEAR * shortest(sides) / 2);
     }
 
     /**
@@ -41,6 +40,12 @@ public final class LimitSolver {
      * @throws IllegalArgumentException when no limit has that run length
      */
     public static double ewma(double weight, Sides sides, double falseAlarmsPerYear) {
+        double least = YEAR / LONGEST_RUN;
+        double most = YEAR / shortest(sides);
+        if (!(falseAlarmsPerYear >= least && falseAlarmsPerYear < most)) {
+            throw new IllegalArgumentException("false alarms a year of an ewma chart must be at least " + least
+                    + " and below " + most + ", were " + falseAlarmsPerYear);
+        }
         return ewmaForRunLength(weight, sides, YEAR / falseAlarmsPerYear);
     }
 
@@ -54,7 +59,7 @@ public final class LimitSolver {
      */
     public static double ewmaForRunLength(double weight, Sides sides, double runLength) {
         Checks.weight(weight);
-        double shortest = sides == Sides.UPPER ? 2 : 1;
+        double shortest = shortest(sides);
         if (!(runLength > shortest && runLength <= LONGEST_RUN)) {
             throw new IllegalArgumentException("mean run length of an ewma chart must be above " + shortest
                     + " and at most " + LONGEST_RUN + " days, was " + runLength);
@@ -65,10 +70,15 @@ public final class LimitSolver {
         }
         double target = StrictMath.log(runLength);
         return new BrentSolver(PRECISION, PRECISION)
-                .solve(MAX_STEPS, limit -> StrictMath.log(logged(weight, sides, limit, shortest)) - target, 0, high);
+                .solve(MAX_STEPS, limit -> StrictMath.log(meanRun(weight, sides, limit)) - target, 0, high);
     }
 
-    private static double logged(double weight, Sides sides, double limit, double shortest) {
-        return limit == 0 ? shortest : RunLength.ewma(weight, sides, limit, 0);
+    private static double meanRun(double weight, Sides sides, double limit) {
+        return limit == 0 ? shortest(sides) : RunLength.ewma(weight, sides, limit, 0);
+    }
+
+    /** Mean run length with limits at zero: every value is beyond two of them, every other beyond the upper one. */
+    private static double shortest(Sides sides) {
+        return sides == Sides.UPPER ? 2 : 1;
     }
 }

@@ -59,6 +59,7 @@ public record Learner(int order, double winsor, int maxWaiting) {
     /** Normal score of the next value; empty while it cannot be judged. Teaches nothing. */
     public OptionalDouble score(LearningState state, double y) {
         requireValue(y);
+        requireOrder(state);
         Regression regression = state.regression();
         return canScore(regression, state.lags())
                 ? OptionalDouble.of(regression.at(state.lags().scoringRow()).score(y))
@@ -128,10 +129,18 @@ public record Learner(int order, double winsor, int maxWaiting) {
         return regression.with(row, response);
     }
 
-    private static void requireNext(LearningState state, LocalDate day, double y) {
+    private void requireNext(LearningState state, LocalDate day, double y) {
         requireValue(y);
+        requireOrder(state);
         if (state.lastDay() != null && !day.isAfter(state.lastDay())) {
             throw new IllegalArgumentException("day must be after " + state.lastDay() + ", was " + day);
+        }
+    }
+
+    private void requireOrder(LearningState state) {
+        int stateOrder = state.regression().columns() - 1;
+        if (stateOrder != order) {
+            throw new IllegalArgumentException("state must be of order " + order + ", was of order " + stateOrder);
         }
     }
 
