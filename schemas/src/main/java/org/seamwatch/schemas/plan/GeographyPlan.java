@@ -12,7 +12,8 @@ import org.jspecify.annotations.Nullable;
  * @param timeZone whose calendar days are counted
  * @param regionId property with a region's id
  * @param regionName property with a region's name
- * @param population property with a region's population; null: the geography has none
+ * @param population property with a region's population, which every region must have; null where the plan names none:
+ *     then it is {@code population}, which all regions or none must have
  * @param populationYear year of the populations
  * @param regions which regions of the file: ids with {@code *} for any characters, commas between patterns
  * @param tolerance gaps and overlaps up to this many coordinate units (degrees) are closed; from 0
