@@ -3,7 +3,7 @@ package org.seamwatch.processors.charts;
 /** Range checks shared by the charts. */
 final class Checks {
 
-    /** An average with less weight on the newest day looks back over more than half a year. */
+    /** With less weight on the newest day the mean age of what is averaged, (1 - w) / w, is beyond 99 days. */
     static final double SMALLEST_WEIGHT = 0.01;
 
     private Checks() {}
@@ -24,7 +24,7 @@ final class Checks {
 
     static double weight(double weight) {
         if (!(weight >= SMALLEST_WEIGHT && weight <= 1)) {
-            throw new IllegalArgumentException("weight must be in [0.01, 1], was " + weight);
+            throw new IllegalArgumentException("weight must be in [" + SMALLEST_WEIGHT + ", 1], was " + weight);
         }
         return weight;
     }

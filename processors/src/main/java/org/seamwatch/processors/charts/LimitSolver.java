@@ -66,7 +66,7 @@ public final class LimitSolver {
         }
         double high = EwmaChart.deviation(weight);
         while (RunLength.ewma(weight, sides, high, 0) < runLength) {
-            high *= 1.5;
+            high *= 1.25;
         }
         double target = StrictMath.log(runLength);
         return new BrentSolver(PRECISION, PRECISION)

@@ -17,6 +17,10 @@ import org.seamwatch.processors.distributions.NormalScore;
 public final class RunLength {
 
     private static final int FEWEST_NODES = 40;
+
+    /** A run length beyond it has no digits left in double precision. */
+    private static final double WIDEST = 8;
+
     private static final double NODES_PER_DEVIATION = 3;
 
     private RunLength() {}
@@ -38,13 +42,17 @@ public final class RunLength {
      * Mean run length of an EWMA chart with fixed limits, reflected at zero where it has an upper side only.
      *
      * @param weight weight of the newest score, in [0.01, 1]
-     * @param limit action limit in the unit of the average, above 0
+     * @param limit action limit in the unit of the average, above 0, at most 8 of its standard deviations
      * @param shift shift of the scores in standard deviations
      */
     public static double ewma(double weight, Sides sides, double limit, double shift) {
-        Checks.weight(weight);
         Checks.limit(limit);
         Checks.shift(shift);
+        double widest = WIDEST * EwmaChart.deviation(weight);
+        if (limit > widest) {
+            throw new IllegalArgumentException("limit must be at most " + WIDEST
+                    + " standard deviations of the average, " + widest + ", was " + limit);
+        }
         return sides == Sides.UPPER ? reflected(weight, limit, shift) : twoSided(weight, limit, shift);
     }
 
@@ -58,7 +66,7 @@ public final class RunLength {
             negateFromIdentity(system[i], i);
         }
         double[] lengths = solve(system);
-        return 1 + sum(kernel(rule, 0, weight, shift), lengths, 0);
+        return 1 + product(kernel(rule, 0, weight, shift), lengths);
     }
 
     /** The unknowns are L(0), then L at the nodes. */
@@ -102,8 +110,8 @@ public final class RunLength {
                 .toArray();
     }
 
-    private static double sum(double[] a, double[] b, double start) {
-        double sum = start;
+    private static double product(double[] a, double[] b) {
+        double sum = 0;
         for (int j = 0; j < a.length; j++) {
             sum += a[j] * b[j];
         }

@@ -66,7 +66,7 @@ public record Learner(int order, double winsor, int maxWaiting) {
                 : OptionalDouble.empty();
     }
 
-    /** The state after a value that teaches at once. The values before it on the log teach or wait before. */
+    /** The state after a value that teaches at once. Waiting values go on waiting. */
     public LearningState teach(LearningState state, LocalDate day, double y) {
         requireNext(state, day, y);
         Lags lags = state.lags();

@@ -198,6 +198,9 @@ class RunLengthTest {
         assertThatThrownBy(() -> RunLength.ewma(0.2, Sides.BOTH, Double.NaN, 0))
                 .isInstanceOf(IllegalArgumentException.class)
                 .hasMessage("limit must be finite and above 0, was NaN");
+        assertThatThrownBy(() -> RunLength.ewma(1, Sides.BOTH, 8.5, 0))
+                .isInstanceOf(IllegalArgumentException.class)
+                .hasMessage("limit must be at most 8.0 standard deviations of the average, 8.0, was 8.5");
         assertThatThrownBy(() -> RunLength.individuals(Sides.BOTH, 0, 0))
                 .isInstanceOf(IllegalArgumentException.class)
                 .hasMessage("limit must be finite and above 0, was 0.0");
