@@ -97,8 +97,7 @@ public record AlarmState(
     }
 
     AlarmState withdraw() {
-        return new AlarmState(
-                id, raisedFor, start, lastSignal, end, true, sequence, statistics, overdue, response);
+        return new AlarmState(id, raisedFor, start, lastSignal, end, true, sequence, statistics, overdue, response);
     }
 
     AlarmState next() {

@@ -12,7 +12,8 @@ import org.jspecify.annotations.Nullable;
  * @param end the day that ended it; null while it is open
  * @param statistics statistics that have signalled, in the plan's order
  */
-public record Episode(LocalDate start, LocalDate lastSignal, @Nullable LocalDate end, List<String> statistics) {
+public record Episode(
+        LocalDate start, LocalDate lastSignal, @Nullable LocalDate end, List<String> statistics) {
 
     public Episode {
         statistics = List.copyOf(statistics);

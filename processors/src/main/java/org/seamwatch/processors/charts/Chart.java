@@ -1,5 +1,8 @@
 package org.seamwatch.processors.charts;
 
+import org.seamwatch.schemas.record.Grade;
+import org.seamwatch.schemas.record.Limits;
+
 /**
  * A control chart of normal scores, one a usable day. A chart is its rule and its limits; what it remembers is a
  * {@link ChartState} in the caller's hands.
@@ -34,9 +37,9 @@ public interface Chart {
     /** Which limit a state is beyond. */
     default Grade grade(ChartState state) {
         double value = value(state);
-        if (action().beyond(value)) {
+        if (action().isBeyond(value)) {
             return Grade.ACTION;
         }
-        return warning().beyond(value) ? Grade.WARNING : Grade.NONE;
+        return warning().isBeyond(value) ? Grade.WARNING : Grade.NONE;
     }
 }

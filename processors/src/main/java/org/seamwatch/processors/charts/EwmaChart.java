@@ -1,5 +1,8 @@
 package org.seamwatch.processors.charts;
 
+import org.seamwatch.schemas.plan.Sides;
+import org.seamwatch.schemas.record.Limits;
+
 /**
  * The exponentially weighted moving average of the scores (Roberts 1959, Technometrics 1:239-250) with fixed limits, z =
  * (1 - w) z + w q from z = 0. With an upper side only the average is reflected at the centre, z = max(0, (1 - w) z + w
@@ -61,11 +64,11 @@ public record EwmaChart(double weight, Sides sides, double limit) implements Cha
 
     @Override
     public Limits action() {
-        return Limits.of(sides, limit);
+        return SymmetricLimits.at(sides, limit);
     }
 
     @Override
     public Limits warning() {
-        return Limits.of(sides, limit * WARNING_PART);
+        return SymmetricLimits.at(sides, limit * WARNING_PART);
     }
 }

@@ -1,5 +1,8 @@
 package org.seamwatch.processors.charts;
 
+import org.seamwatch.schemas.plan.Sides;
+import org.seamwatch.schemas.record.Limits;
+
 /**
  * The individuals chart (Shewhart 1931): each score by itself against its limits. The change is dated to the day itself.
  *
@@ -39,11 +42,11 @@ public record IndividualsChart(Sides sides, double limit) implements Chart {
 
     @Override
     public Limits action() {
-        return Limits.of(sides, limit);
+        return SymmetricLimits.at(sides, limit);
     }
 
     @Override
     public Limits warning() {
-        return Limits.of(sides, limit * WARNING_PART);
+        return SymmetricLimits.at(sides, limit * WARNING_PART);
     }
 }

@@ -2,6 +2,7 @@ package org.seamwatch.processors.charts;
 
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.seamwatch.processors.distributions.NormalScore;
+import org.seamwatch.schemas.plan.Sides;
 
 /** Action limits from an intended number of false alarms a year, solved and not looked up. */
 public final class LimitSolver {

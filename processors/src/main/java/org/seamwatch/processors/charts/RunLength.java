@@ -4,6 +4,7 @@ import org.apache.commons.math3.linear.Array2DRowRealMatrix;
 import org.apache.commons.math3.linear.ArrayRealVector;
 import org.apache.commons.math3.linear.LUDecomposition;
 import org.seamwatch.processors.distributions.NormalScore;
+import org.seamwatch.schemas.plan.Sides;
 
 /**
  * Mean run lengths, in usable days from a start at the centre to the first signal, for independent normal scores with

@@ -43,8 +43,7 @@ final class ClusterFinder {
             total += y;
         }
         double[] people = ground.populations();
-        this.expected =
-                Shares.expected(total, connected.pick(history), people == null ? null : connected.pick(people));
+        this.expected = Shares.expected(total, connected.pick(history), people == null ? null : connected.pick(people));
         this.excess = new double[cases.length];
         for (int i = 0; i < excess.length; i++) {
             excess[i] = residual(cases[i], expected[i]);
@@ -110,7 +109,10 @@ final class ClusterFinder {
                 .map(this::region)
                 .toList();
         return new Cluster(
-                (long) found.cases(), Rounding.hundredths(found.expected()), found.members().size(), regions);
+                (long) found.cases(),
+                Rounding.hundredths(found.expected()),
+                found.members().size(),
+                regions);
     }
 
     private ClusterRegion region(int i) {

@@ -31,7 +31,10 @@ final class EvidenceSize {
         List<EvidenceHistory> history = e.history().stream()
                 .map(h -> new EvidenceHistory(
                         h.statistic(),
-                        h.days().subList(Math.min(droppedDays, h.days().size()), h.days().size())))
+                        h.days()
+                                .subList(
+                                        Math.min(droppedDays, h.days().size()),
+                                        h.days().size())))
                 .toList();
         return new Evidence(
                 e.summary(),

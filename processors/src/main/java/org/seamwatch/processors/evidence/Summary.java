@@ -29,8 +29,8 @@ final class Summary {
 
     Summary(SeriesSpec spec) {
         this.spec = spec;
-        this.title =
-                Wording.title(spec.condition()) + ", " + Wording.title(spec.geography().id()) + ": ";
+        this.title = Wording.title(spec.condition()) + ", "
+                + Wording.title(spec.geography().id()) + ": ";
     }
 
     String of(AlarmMove move, LocalDate day, List<Cluster> clusters, List<EvidenceChart> charts, Quality quality) {
@@ -58,10 +58,8 @@ final class Summary {
             return Wording.count(quality.cases(), "case") + ", no group of regions far above its usual share,";
         }
         Cluster first = clusters.get(0);
-        List<String> names = first.regions().stream()
-                .limit(NAMED)
-                .map(ClusterRegion::name)
-                .toList();
+        List<String> names =
+                first.regions().stream().limit(NAMED).map(ClusterRegion::name).toList();
         return Wording.count(first.cases(), "case") + " (" + Wording.number(first.expected()) + " expected) in "
                 + Wording.list(names, first.regionCount() - names.size());
     }
@@ -77,8 +75,8 @@ final class Summary {
                 + (began == null ? "" : " since about " + began.format(DAY))
                 + (limit == null
                         ? ""
-                        : " (chart at " + Wording.number(beyond.value()) + ", action limit "
-                                + Wording.number(limit) + ")");
+                        : " (chart at " + Wording.number(beyond.value()) + ", action limit " + Wording.number(limit)
+                                + ")");
     }
 
     private static @Nullable EvidenceChart strongest(List<EvidenceChart> charts) {

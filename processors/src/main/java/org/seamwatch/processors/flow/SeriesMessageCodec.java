@@ -59,11 +59,7 @@ public final class SeriesMessageCodec {
                         Json.read(in.text().getBytes(StandardCharsets.UTF_8), AlarmResponse.class));
             case WATERMARK ->
                 new Watermark(
-                        in.text(),
-                        in.integer(),
-                        in.number(),
-                        in.number(),
-                        new InputSizes(in.integer(), in.integer()));
+                        in.text(), in.integer(), in.number(), in.number(), new InputSizes(in.integer(), in.integer()));
             default -> throw new IllegalArgumentException("message kind must be 0 to 2, was " + kind);
         };
     }

@@ -48,8 +48,7 @@ final class HourTally {
         SortedMap<String, SortedMap<String, Cases>> days = new TreeMap<>();
         rows.visit((key, row) -> {
             int cut = key.lastIndexOf('|');
-            days.computeIfAbsent(key.substring(0, cut), k -> new TreeMap<>())
-                    .put(key.substring(cut + 1), read(row));
+            days.computeIfAbsent(key.substring(0, cut), k -> new TreeMap<>()).put(key.substring(cut + 1), read(row));
             rows.remove(key);
         });
         days.forEach((seriesDay, cells) -> {

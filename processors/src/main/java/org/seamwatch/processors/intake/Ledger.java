@@ -15,7 +15,8 @@ final class Ledger {
     }
 
     /** What the report last said, unless that lies beyond the horizon at this time. */
-    @Nullable LedgerEntry get(String reportId, long time) {
+    @Nullable
+    LedgerEntry get(String reportId, long time) {
         byte @Nullable [] row = rows.get(reportId);
         if (row == null) {
             return null;

@@ -38,7 +38,7 @@ record LedgerEntry(CaseReport report, String region, List<Contribution> contribu
     byte[] row() {
         CaseReport r = report;
         ByteWriter out = new ByteWriter(VERSION);
-        out.text(r.source()).number(r.revision()).number(r.status().ordinal()).text(r.condition());
+        out.text(r.source()).number(r.revision()).text(r.status().name()).text(r.condition());
         out.textOrNull(r.region());
         Position position = r.position();
         if (position != null) {
@@ -54,7 +54,7 @@ record LedgerEntry(CaseReport report, String region, List<Contribution> contribu
         ByteReader in = new ByteReader(row, VERSION);
         String source = in.text();
         long revision = in.number();
-        ReportStatus status = ReportStatus.values()[in.integer()];
+        ReportStatus status = ReportStatus.valueOf(in.text());
         String condition = in.text();
         String code = in.textOrNull();
         Position position = code == null ? new Position(in.real(), in.real()) : null;

@@ -14,12 +14,7 @@ import org.jspecify.annotations.Nullable;
  */
 @SuppressWarnings("ArrayRecordComponent") // handed over, never compared
 public record LogRecord(
-        String topic,
-        int partition,
-        long offset,
-        long timestamp,
-        byte @Nullable [] key,
-        byte @Nullable [] value) {
+        String topic, int partition, long offset, long timestamp, byte @Nullable [] key, byte @Nullable [] value) {
 
     public LogRecord {
         timestamp = Math.max(0, timestamp);

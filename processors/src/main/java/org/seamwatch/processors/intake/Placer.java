@@ -25,7 +25,8 @@ final class Placer {
     }
 
     /** Either the entry a report makes, or why it makes none. */
-    record Placing(@Nullable LedgerEntry entryOrNull, @Nullable Refusal why) {
+    record Placing(
+            @Nullable LedgerEntry entryOrNull, @Nullable Refusal why) {
 
         LedgerEntry entry() {
             if (entryOrNull == null) {
@@ -73,7 +74,7 @@ final class Placer {
             return code;
         }
         Position position = report.position();
-        return position == null ? null : watch.regionAt(position.lon(), position.lat());
+        return position == null ? null : watch.regionAt(position);
     }
 
     private Placing unrouted(CaseReport report, String region) {

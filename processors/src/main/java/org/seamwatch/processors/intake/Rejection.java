@@ -17,8 +17,7 @@ import org.jspecify.annotations.Nullable;
  * @param key its key, cut
  * @param value its value, cut
  */
-public record Rejection(
-        String topic, int partition, long offset, long timestamp, Refusal why, Cut key, Cut value) {
+public record Rejection(String topic, int partition, long offset, long timestamp, Refusal why, Cut key, Cut value) {
 
     /** Bytes kept of a rejected record's key, and of its value. */
     public static final int KEPT = 256 * 1024;
@@ -42,7 +41,10 @@ public record Rejection(
      * @param sha256 SHA-256 of the whole, hexadecimal; null where nothing was cut
      */
     @SuppressWarnings("ArrayRecordComponent") // handed over, never compared
-    public record Cut(byte @Nullable [] bytes, @Nullable Integer length, @Nullable String sha256) {
+    public record Cut(
+            byte @Nullable [] bytes,
+            @Nullable Integer length,
+            @Nullable String sha256) {
 
         static Cut of(byte @Nullable [] whole) {
             if (whole == null || whole.length <= KEPT) {

@@ -35,13 +35,7 @@ public final class ReportIntake {
      * @param accounts rows by topic and partition
      */
     public ReportIntake(
-            Watch watch,
-            int partition,
-            InputSizes sizes,
-            Shelf ledger,
-            Shelf tally,
-            Shelf accounts,
-            IntakeOutput out) {
+            Watch watch, int partition, InputSizes sizes, Shelf ledger, Shelf tally, Shelf accounts, IntakeOutput out) {
         this.partition = partition;
         this.input = new InputPartition(Topics.CASE_REPORTS, partition, sizes, accounts, out);
         this.horizon = new Horizon(watch);

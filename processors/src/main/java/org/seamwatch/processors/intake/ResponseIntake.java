@@ -62,7 +62,9 @@ public final class ResponseIntake {
         String series = new String(key, StandardCharsets.UTF_8);
         if (!response.alarm().startsWith(series + "/")) {
             return new Refusal(
-                    RejectReason.KEY_MISMATCH, "alarm", "the record's key must be the series of the alarm, was another");
+                    RejectReason.KEY_MISMATCH,
+                    "alarm",
+                    "the record's key must be the series of the alarm, was another");
         }
         if (!watch.series().containsKey(series)) {
             return new Refusal(RejectReason.NO_SERIES_TAKES_IT, "alarm", "no series of the plan is " + series);

@@ -35,7 +35,8 @@ final class AlarmShelf {
         }
     }
 
-    @Nullable Kept get(String id) {
+    @Nullable
+    Kept get(String id) {
         return alarms.get(id);
     }
 

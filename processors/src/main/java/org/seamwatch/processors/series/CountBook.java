@@ -96,11 +96,7 @@ final class CountBook {
         LocalDate to = day.minusDays(DayInput.HISTORY_TO);
         int days = Math.toIntExact(Math.max(0, to.toEpochDay() - from.toEpochDay() + 1));
         return new DayInput(
-                day,
-                over(day.minusDays(spec.plan().windowDays() - 1L), day),
-                over(from, to),
-                days,
-                spec.unjudged(day));
+                day, over(day.minusDays(spec.plan().windowDays() - 1L), day), over(from, to), days, spec.unjudged(day));
     }
 
     /** Cases of the geography on a day, regions that left the plan not counted. */

@@ -22,7 +22,8 @@ final class DayBook {
         return series + "|" + day;
     }
 
-    @Nullable DayState get(LocalDate day) {
+    @Nullable
+    DayState get(LocalDate day) {
         byte @Nullable [] row = rows.get(key(day));
         return row == null ? null : VersionedJson.read(row, VERSION, DayState.class);
     }

@@ -2,6 +2,7 @@ package org.seamwatch.processors.series;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import org.seamwatch.processors.flow.Cases;
@@ -56,7 +57,7 @@ final class DayCounts {
     /** Adds a change; whether it changes any count. */
     boolean add(SortedMap<String, Cases> change, boolean closed) {
         boolean changed = false;
-        for (SortedMap.Entry<String, Cases> e : change.entrySet()) {
+        for (Map.Entry<String, Cases> e : change.entrySet()) {
             Cell cell = cells.getOrDefault(e.getKey(), EMPTY);
             put(e.getKey(), new Cell(cell.cases().plus(e.getValue()), cell.emitted()));
             changed |= e.getValue().count() != 0;

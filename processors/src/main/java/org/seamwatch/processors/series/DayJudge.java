@@ -30,7 +30,11 @@ final class DayJudge {
         this.spec = spec;
     }
 
-    private record Judged(Statistic statistic, Reading reading, BoardState before, @Nullable Judgement judgement) {
+    private record Judged(
+            Statistic statistic,
+            Reading reading,
+            BoardState before,
+            @Nullable Judgement judgement) {
 
         Signal signal() {
             return new Signal(statistic.name(), judgement != null, judgement != null && judgement.signals());

@@ -40,8 +40,7 @@ final class Progress {
     void save() {
         ByteWriter out = new ByteWriter(VERSION).number(expected).number(begun ? 1 : 0);
         out.number(applied).number(places.size());
-        places.forEach(
-                (key, p) -> out.text(key).number(p.passedHour()).number(p.firstTimestamp()));
+        places.forEach((key, p) -> out.text(key).number(p.passedHour()).number(p.firstTimestamp()));
         rows.put(KEY, out.bytes());
     }
 

@@ -78,8 +78,7 @@ final class SeriesKeeper {
         boolean past = book.isPast(day);
         boolean changed = counts.add(day, change.cells(), past);
         if (past && changed) {
-            LocalDate today =
-                    Hours.end(change.hour() - 1).atZone(spec.zone()).toLocalDate();
+            LocalDate today = Hours.end(change.hour() - 1).atZone(spec.zone()).toLocalDate();
             boolean young = !day.isBefore(today.minusDays(spec.plan().reviseForDays()));
             book = book.changed(day, young && !day.isBefore(book.learnsFrom()));
         }

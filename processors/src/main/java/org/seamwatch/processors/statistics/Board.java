@@ -82,7 +82,8 @@ public final class Board {
     /** Lets a judged value teach, or wait. */
     public BoardState settle(Judgement judgement, LocalDate day, double value, Lesson lesson) {
         LearningState learning = judgement.moved().learning();
-        LearningState next = lesson == Lesson.TEACH ? learner.teach(learning, day, value) : learner.hold(learning, day, value);
+        LearningState next =
+                lesson == Lesson.TEACH ? learner.teach(learning, day, value) : learner.hold(learning, day, value);
         return new BoardState(released(next, lesson), judgement.moved().charts());
     }
 

@@ -153,8 +153,8 @@ public final class MoranStatistic implements Statistic {
             return MoranReading.without(m.status());
         }
         // The number of regions used is not part of the record and nothing after the reading asks for it.
-        Moran moran = new Moran(
-                day.regions(), m.i(), m.expected(), m.varianceNormality(), m.varianceRandomisation(), m.z());
+        Moran moran =
+                new Moran(day.regions(), m.i(), m.expected(), m.varianceNormality(), m.varianceRandomisation(), m.z());
         return new MoranReading(m.status(), moran, m.permutations(), m.pUpper());
     }
 

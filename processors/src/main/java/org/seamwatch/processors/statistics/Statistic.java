@@ -20,10 +20,12 @@ public interface Statistic {
     boolean reads(LocalDate day, LocalDate other);
 
     /** The reading that an emitted day holds; null where the day does not have this statistic. */
-    @Nullable Reading recall(SeriesDay day);
+    @Nullable
+    Reading recall(SeriesDay day);
 
     /** What an emitted day says of it; null where the day does not have this statistic. */
-    @Nullable StatisticDay said(SeriesDay day);
+    @Nullable
+    StatisticDay said(SeriesDay day);
 
     /** Its learning and charts. */
     Board board();

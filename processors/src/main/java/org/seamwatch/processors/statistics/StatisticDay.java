@@ -16,7 +16,10 @@ import org.seamwatch.schemas.record.StatisticStatus;
  * @param charts where its charts stood
  */
 public record StatisticDay(
-        StatisticStatus status, @Nullable Double value, @Nullable LearningDay learning, List<ChartDay> charts) {
+        StatisticStatus status,
+        @Nullable Double value,
+        @Nullable LearningDay learning,
+        List<ChartDay> charts) {
 
     public StatisticDay {
         charts = List.copyOf(charts);

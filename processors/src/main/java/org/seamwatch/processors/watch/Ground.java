@@ -28,8 +28,7 @@ public final class Ground {
     }
 
     static Ground of(Geography geography, ContiguityRule rule, WeightStyle style) {
-        List<Geometry> shapes =
-                geography.regions().stream().map(Region::shape).toList();
+        List<Geometry> shapes = geography.regions().stream().map(Region::shape).toList();
         double tolerance = geography.plan().tolerance();
         int[][] neighbours;
         if (rule instanceof ContiguityRule.Nearest nearest) {

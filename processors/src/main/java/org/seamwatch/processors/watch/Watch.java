@@ -14,6 +14,7 @@ import org.seamwatch.schemas.geography.Geography;
 import org.seamwatch.schemas.geography.Region;
 import org.seamwatch.schemas.geography.RegionFinder;
 import org.seamwatch.schemas.plan.Plan;
+import org.seamwatch.schemas.record.Position;
 
 /** A plan made ready: immutable, shared by all tasks. */
 public final class Watch {
@@ -80,7 +81,7 @@ public final class Watch {
     }
 
     /** The region at a place, or null. */
-    public @Nullable String regionAt(double lon, double lat) {
-        return finder.find(lon, lat).orElse(null);
+    public @Nullable String regionAt(Position position) {
+        return finder.find(position).orElse(null);
     }
 }

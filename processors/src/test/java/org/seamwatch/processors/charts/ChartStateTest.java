@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import org.junit.jupiter.api.Test;
+import org.seamwatch.schemas.record.Limits;
 
 class ChartStateTest {
 
@@ -40,10 +41,10 @@ class ChartStateTest {
     @Test
     void shouldCountALimitItselfAsInside() {
         Limits limits = new Limits(-1.0, 2.0);
-        assertThat(limits.beyond(2)).isFalse();
-        assertThat(limits.beyond(Math.nextUp(2.0))).isTrue();
-        assertThat(limits.beyond(-1)).isFalse();
-        assertThat(limits.beyond(Math.nextDown(-1.0))).isTrue();
+        assertThat(limits.isBeyond(2)).isFalse();
+        assertThat(limits.isBeyond(Math.nextUp(2.0))).isTrue();
+        assertThat(limits.isBeyond(-1)).isFalse();
+        assertThat(limits.isBeyond(Math.nextDown(-1.0))).isTrue();
         assertThat(new Limits(null, 2.0).beyond(-100)).isFalse();
     }
 }

@@ -13,6 +13,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.seamwatch.fixtures.reference.ReferenceEntry;
 import org.seamwatch.fixtures.reference.ReferenceValues;
+import org.seamwatch.schemas.plan.Sides;
+import org.seamwatch.schemas.record.Grade;
+import org.seamwatch.schemas.record.Limits;
 
 class EwmaChartTest {
 

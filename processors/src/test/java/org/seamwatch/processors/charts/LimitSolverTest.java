@@ -10,6 +10,7 @@ import org.junit.jupiter.params.provider.CsvSource;
 import org.junit.jupiter.params.provider.ValueSource;
 import org.seamwatch.fixtures.reference.ReferenceEntry;
 import org.seamwatch.fixtures.reference.ReferenceValues;
+import org.seamwatch.schemas.plan.Sides;
 
 class LimitSolverTest {
 

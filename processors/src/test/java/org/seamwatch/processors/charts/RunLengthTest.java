@@ -14,6 +14,8 @@ import org.junit.jupiter.params.provider.ValueSource;
 import org.seamwatch.fixtures.reference.ReferenceEntry;
 import org.seamwatch.fixtures.reference.ReferenceValues;
 import org.seamwatch.processors.distributions.NormalScore;
+import org.seamwatch.schemas.plan.Sides;
+import org.seamwatch.schemas.record.Grade;
 
 class RunLengthTest {
 

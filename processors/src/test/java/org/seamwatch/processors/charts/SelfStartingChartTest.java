@@ -10,6 +10,8 @@ import org.apache.commons.rng.simple.RandomSource;
 import org.junit.jupiter.api.Test;
 import org.seamwatch.processors.learning.Learner;
 import org.seamwatch.processors.learning.LearningState;
+import org.seamwatch.schemas.plan.Sides;
+import org.seamwatch.schemas.record.Grade;
 
 /**
  * Learning and chart together on made series in control, 120 of three years: how often they are wrong against 1.5 a year

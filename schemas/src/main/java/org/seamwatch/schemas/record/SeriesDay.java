@@ -44,7 +44,6 @@ public record SeriesDay(
 
     /** The same day with its Moran's I. */
     public SeriesDay withMoran(MoranDay newMoran) {
-        return new SeriesDay(
-                version, series, day, revision, closedAt, cases, regions, isolated, unjudged, newMoran);
+        return new SeriesDay(version, series, day, revision, closedAt, cases, regions, isolated, unjudged, newMoran);
     }
 }
