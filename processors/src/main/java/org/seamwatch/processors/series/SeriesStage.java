@@ -110,7 +110,8 @@ public final class SeriesStage {
             }
         }
         keepers.forEach((id, keeper) -> {
-            if (keeper.close(hour) | touched.containsKey(id)) {
+            boolean closed = keeper.close(hour);
+            if (closed || touched.containsKey(id)) {
                 keeper.save();
             }
         });
