@@ -45,6 +45,6 @@ class ChartStateTest {
         assertThat(limits.isBeyond(Math.nextUp(2.0))).isTrue();
         assertThat(limits.isBeyond(-1)).isFalse();
         assertThat(limits.isBeyond(Math.nextDown(-1.0))).isTrue();
-        assertThat(new Limits(null, 2.0).beyond(-100)).isFalse();
+        assertThat(new Limits(null, 2.0).isBeyond(-100)).isFalse();
     }
 }
