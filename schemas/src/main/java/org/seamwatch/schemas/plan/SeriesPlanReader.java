@@ -93,7 +93,7 @@ final class SeriesPlanReader {
         for (YamlValue item : value.list()) {
             if (item.isMap()) {
                 YamlMap map = item.map().only(List.of("day", "regions"));
-                holidays.add(new HolidayPlan(map.required("day").date(), map.text("regions", "*")));
+                holidays.add(new HolidayPlan(map.required("day").date(), map.patterns("regions")));
             } else {
                 holidays.add(new HolidayPlan(item.date(), "*"));
             }
