@@ -1,0 +1,16 @@
+package org.seamwatch.ops;
+
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+
+/** Sends. */
+@Command(name = "send")
+final class SendCommand implements Callable<Integer> {
+    @Override
+    public Integer call() {
+        return 0;
+    }
+}
