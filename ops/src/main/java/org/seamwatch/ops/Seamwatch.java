@@ -34,6 +34,7 @@ public final class Seamwatch implements Callable<Integer> {
     @Spec
     private CommandSpec spec = CommandSpec.create();
 
+    @SuppressWarnings("unused") // read by picocli
     @Option(
             names = {"-h", "--help"},
             usageHelp = true,
@@ -41,6 +42,7 @@ public final class Seamwatch implements Callable<Integer> {
             description = "show this help and exit")
     private boolean help;
 
+    @SuppressWarnings("unused") // read by picocli
     @Option(
             names = {"-V", "--version"},
             versionHelp = true,
