@@ -57,7 +57,9 @@ public final class CaseReportReader {
         if (fields.has("region")) {
             if (placed) {
                 throw new Refused(
-                        RejectReason.REGION_AND_POSITION, "region", "exactly one of region and position must be there");
+                        RejectReason.REGION_AND_POSITION,
+                        "region",
+                        "exactly one of region and position must be there, were both");
             }
             return fields.plainId("region");
         }
