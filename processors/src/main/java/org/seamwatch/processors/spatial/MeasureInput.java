@@ -13,7 +13,8 @@ import org.jspecify.annotations.Nullable;
 @SuppressWarnings("ArrayRecordComponent") // a bundle of arguments, never compared
 public record MeasureInput(double[] cases, double @Nullable [] population, double[] history) {
 
-    public MeasureInput {
+    // Written out: the class file of a compact constructor does not tell callers that population may be null.
+    public MeasureInput(double[] cases, double @Nullable [] population, double[] history) {
         checkCounts("cases", cases);
         checkLength("history", history, cases.length);
         checkCounts("history", history);
@@ -21,6 +22,9 @@ public record MeasureInput(double[] cases, double @Nullable [] population, doubl
             checkLength("population", population, cases.length);
             checkPopulation(population);
         }
+        this.cases = cases;
+        this.population = population;
+        this.history = history;
     }
 
     /** Number of regions. */
