@@ -12,7 +12,7 @@ final class Inputs {
     private Inputs() {}
 
     /** The record as it lies in the log. */
-    @SuppressWarnings("NullAway") // the engine's records may have no key and no value
+    @SuppressWarnings("NullAway") // it does not see the nullness of arrays in compiled records
     static LogRecord logRecord(String topic, ProcessorContext<?, ?> context, Record<byte[], byte[]> record) {
         RecordMetadata place = context.recordMetadata()
                 .orElseThrow(() -> new IllegalStateException("a record of " + topic + " has no place in the log"));

@@ -22,6 +22,7 @@ public final class TestPlan {
     private int partitions = 1;
     private int seriesPartitions = 1;
     private int threads = 1;
+    private double falseAlarmsPerYear = 6;
 
     private TestPlan(Path folder) {
         this.folder = folder;
@@ -54,6 +55,12 @@ public final class TestPlan {
 
     public TestPlan threads(int newThreads) {
         threads = newThreads;
+        return this;
+    }
+
+    /** Many, where a test needs alarms within weeks. */
+    public TestPlan falseAlarmsPerYear(double number) {
+        falseAlarmsPerYear = number;
         return this;
     }
 
@@ -93,8 +100,9 @@ public final class TestPlan {
                 topics: { prefix: "%s", partitions: %d, seriesPartitions: %d, replication: 1 }
                 geographies:
                   - { file: northmarch.geojson, id: northmarch, timeZone: UTC, regionId: id, regionName: name, population: population, populationYear: 2023 }
+                desk: { falseAlarmsPerYear: %s }
                 series:
                   - { geography: northmarch, conditions: [ influenza, norovirus ], closeAfter: 1d, reviseFor: 28d, permutations: 99 }
-                """.formatted(threads, prefix, partitions, seriesPartitions);
+                """.formatted(threads, prefix, partitions, seriesPartitions, falseAlarmsPerYear);
     }
 }

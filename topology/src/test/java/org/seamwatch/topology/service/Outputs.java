@@ -1,16 +1,19 @@
 package org.seamwatch.topology.service;
 
+import static org.assertj.core.api.Assertions.assertThat;
+
+import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
-import java.io.IOException;
-import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.Base64;
 import java.util.Comparator;
 import java.util.List;
-import java.util.function.Function;
-import java.util.stream.StreamSupport;
+import java.util.Map;
+import java.util.TreeMap;
+import java.util.stream.Collectors;
 import org.apache.kafka.clients.consumer.ConsumerRecord;
+import org.jspecify.annotations.Nullable;
 import org.seamwatch.fixtures.broker.TopicTool;
 import org.seamwatch.processors.flow.Topics;
 
@@ -28,18 +31,68 @@ public record Outputs(String regionDays, String seriesDays, String alarms, Strin
     private static final ObjectMapper MAPPER = new ObjectMapper();
 
     static Outputs read(TopicTool tool, String prefix) {
+        return of(
+                said(tool.readCommitted(prefix + Topics.REGION_DAYS)),
+                said(tool.readCommitted(prefix + Topics.SERIES_DAYS)),
+                said(tool.readCommitted(prefix + Topics.ALARMS)),
+                tool.readCommitted(prefix + Topics.REJECTED_REPORTS).stream()
+                        .map(Outputs::rejectedLine)
+                        .toList());
+    }
+
+    /** Sorts what was said in any order. */
+    static Outputs of(List<Said> regionDays, List<Said> seriesDays, List<Said> alarms, List<String> rejected) {
         return new Outputs(
-                json(tool.readCommitted(prefix + Topics.REGION_DAYS), "series", "region", "day", "revision"),
-                json(tool.readCommitted(prefix + Topics.SERIES_DAYS), "series", "day", "revision"),
-                json(tool.readCommitted(prefix + Topics.ALARMS), "series", "alarm", "sequence"),
-                rejected(tool.readCommitted(prefix + Topics.REJECTED_REPORTS)));
+                lines(regionDays, "series", "region", "day", "revision"),
+                lines(seriesDays, "series", "day", "revision"),
+                lines(alarms, "series", "alarm", "sequence"),
+                rejected.stream().sorted().map(line -> line + "\n").collect(Collectors.joining()));
     }
 
-    private static String json(List<ConsumerRecord<byte[], byte[]>> records, String... fields) {
-        return lines(records, record -> sortKey(record.value(), fields), Outputs::line);
+    /** A record of our own, as text. */
+    record Said(String key, long timestamp, String value) {}
+
+    private static List<Said> said(List<ConsumerRecord<byte[], byte[]>> records) {
+        assertThat(records).allSatisfy(r -> assertThat(r.headers()).isEmpty());
+        return records.stream()
+                .map(r -> new Said(text(r.key()), r.timestamp(), text(r.value())))
+                .toList();
     }
 
-    private static String sortKey(byte[] value, String... fields) {
+    private static String lines(List<Said> records, String... fields) {
+        return records.stream()
+                .sorted(Comparator.comparing(record -> sortKey(record.value(), fields)))
+                .map(r -> r.key() + " " + r.timestamp() + " " + r.value() + "\n")
+                .collect(Collectors.joining());
+    }
+
+    /** A rejected record: where it came from, why, when, and its bytes. */
+    static String rejectedLine(
+            String topic,
+            int partition,
+            long offset,
+            Map<String, String> headers,
+            long timestamp,
+            byte @Nullable [] key,
+            byte @Nullable [] value) {
+        return String.format("%s %09d %012d ", topic, partition, offset) + new TreeMap<>(headers) + " " + timestamp
+                + " " + base64(key) + " " + base64(value);
+    }
+
+    private static String rejectedLine(ConsumerRecord<byte[], byte[]> record) {
+        Map<String, String> headers = new TreeMap<>();
+        record.headers().forEach(h -> headers.put(h.key(), text(h.value())));
+        return rejectedLine(
+                headers.getOrDefault("topic", ""),
+                Integer.parseInt(headers.getOrDefault("partition", "")),
+                Long.parseLong(headers.getOrDefault("offset", "")),
+                headers,
+                record.timestamp(),
+                record.key(),
+                record.value());
+    }
+
+    private static String sortKey(String value, String... fields) {
         try {
             JsonNode node = MAPPER.readTree(value);
             StringBuilder key = new StringBuilder();
@@ -49,58 +102,12 @@ public record Outputs(String regionDays, String seriesDays, String alarms, Strin
                         .append('\0');
             }
             return key.toString();
-        } catch (IOException e) {
-            throw new UncheckedIOException(e);
+        } catch (JsonProcessingException e) {
+            throw new AssertionError(value, e);
         }
     }
 
-    private static String line(ConsumerRecord<byte[], byte[]> record) {
-        if (record.headers().iterator().hasNext()) {
-            throw new AssertionError("a record of " + record.topic() + " must have no headers");
-        }
-        return text(record.key()) + " " + record.timestamp() + " " + text(record.value());
-    }
-
-    private static String rejected(List<ConsumerRecord<byte[], byte[]>> records) {
-        return lines(
-                records,
-                r -> header(r, "topic")
-                        + '\0'
-                        + String.format("%09d", Integer.parseInt(header(r, "partition")))
-                        + '\0'
-                        + String.format("%012d", Long.parseLong(header(r, "offset"))),
-                Outputs::rejectedLine);
-    }
-
-    private static String rejectedLine(ConsumerRecord<byte[], byte[]> record) {
-        StringBuilder line = new StringBuilder();
-        StreamSupport.stream(record.headers().spliterator(), false)
-                .forEach(h ->
-                        line.append(h.key()).append('=').append(text(h.value())).append(' '));
-        return line.append(record.timestamp())
-                .append(' ')
-                .append(base64(record.key()))
-                .append(' ')
-                .append(base64(record.value()))
-                .toString();
-    }
-
-    static String header(ConsumerRecord<byte[], byte[]> record, String name) {
-        return text(record.headers().lastHeader(name).value());
-    }
-
-    private static String lines(
-            List<ConsumerRecord<byte[], byte[]>> records,
-            Function<ConsumerRecord<byte[], byte[]>, String> order,
-            Function<ConsumerRecord<byte[], byte[]>, String> line) {
-        StringBuilder text = new StringBuilder();
-        records.stream()
-                .sorted(Comparator.comparing(order))
-                .forEach(record -> text.append(line.apply(record)).append('\n'));
-        return text.toString();
-    }
-
-    private static String base64(byte[] bytes) {
+    private static String base64(byte @Nullable [] bytes) {
         return bytes == null ? "null" : Base64.getEncoder().encodeToString(bytes);
     }
 
