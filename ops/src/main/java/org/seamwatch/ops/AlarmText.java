@@ -62,9 +62,7 @@ final class AlarmText {
 
     /** "Ended" alone could be read as the end of an outbreak. */
     private static String word(Change change) {
-        return change == Change.ENDED
-                ? "back inside its limits"
-                : change.name().toLowerCase(Locale.ROOT);
+        return change == Change.ENDED ? "back inside its limits" : change.name().toLowerCase(Locale.ROOT);
     }
 
     private void where() {
@@ -75,7 +73,8 @@ final class AlarmText {
                     .limit(PLACES)
                     .map(AlarmText::place)
                     .collect(Collectors.joining("; "));
-            int more = cluster.regionCount() - Math.min(PLACES, cluster.regions().size());
+            int more =
+                    cluster.regionCount() - Math.min(PLACES, cluster.regions().size());
             row(
                     i == 0 ? "where" : "",
                     String.format(Locale.ROOT, "%,d cases, %,.1f expected: ", cluster.cases(), cluster.expected())

@@ -30,7 +30,8 @@ final class Failures {
         CommandLine command = e.getCommandLine();
         String said = oneLine(e.getMessage());
         String near = "";
-        if (e instanceof UnmatchedArgumentException unmatched && !unmatched.getSuggestions().isEmpty()) {
+        if (e instanceof UnmatchedArgumentException unmatched
+                && !unmatched.getSuggestions().isEmpty()) {
             near = "; did you mean " + String.join(" or ", unmatched.getSuggestions()) + "?";
         }
         line(lowerFirst(said) + near + " (see " + command.getCommandSpec().qualifiedName() + " --help)");

@@ -97,7 +97,9 @@ final class ReplayCommand implements Callable<Integer> {
         long lines = feed(replay, partitions);
         if (!replay.isBegun()) {
             throw new InputException(
-                    lines == 0 ? "the reports must have at least one record, have none" : "no record lies before --until");
+                    lines == 0
+                            ? "the reports must have at least one record, have none"
+                            : "no record lies before --until");
         }
         replay.finish();
         List<AccountingLine> accounts = replay.accounts();

@@ -15,8 +15,10 @@ final class UntilConverter implements ITypeConverter<Long> {
     public Long convert(String text) {
         try {
             if (text.length() == "2024-02-03".length()) {
-                Instant end =
-                        LocalDate.parse(text).plusDays(1).atStartOfDay(ZoneOffset.UTC).toInstant();
+                Instant end = LocalDate.parse(text)
+                        .plusDays(1)
+                        .atStartOfDay(ZoneOffset.UTC)
+                        .toInstant();
                 return end.toEpochMilli() - 1;
             }
             return OffsetDateTime.parse(text).toInstant().toEpochMilli();

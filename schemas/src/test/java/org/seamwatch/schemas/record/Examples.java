@@ -61,7 +61,7 @@ final class Examples {
                         List.of(
                                 new ClusterRegion("NM-014", "Alder", 40, 6.5, 31, 6, 80.2, 2023),
                                 new ClusterRegion("NM-015", "Birch", 31, 6, 40, 6.5, null, null)))),
-                new Quality(412, 30, -2, 0, 0),
+                new Quality(412, 30, -2, 0, 1),
                 new Method(List.of("Moran's I"), 6, 3, 157, false),
                 new Repeat("0.1.0", "ab".repeat(32), "2024a"),
                 "A statistical signal is not a confirmed outbreak.");

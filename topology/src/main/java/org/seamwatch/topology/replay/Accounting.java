@@ -47,7 +47,6 @@ public final class Accounting {
 
     /** Whether everything read is counted once. */
     public static boolean balances(AccountingLine line) {
-        return line.read()
-                == line.accepted() + line.duplicate() + line.superseded() + line.rejected() + line.control();
+        return line.read() == line.accepted() + line.duplicate() + line.superseded() + line.rejected() + line.control();
     }
 }

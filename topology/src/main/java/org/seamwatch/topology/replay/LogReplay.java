@@ -138,9 +138,7 @@ public final class LogReplay implements LogSink {
         List<AccountingLine> lines = new ArrayList<>();
         for (ReplayPartition partition : partitions) {
             lines.add(Accounting.line(
-                    partition.topic(),
-                    partition.number(),
-                    partition.intake().account()));
+                    partition.topic(), partition.number(), partition.intake().account()));
         }
         lines.sort(Accounting.ORDER);
         return lines;

@@ -33,8 +33,7 @@ public final class LogWriter implements LogSink, Closeable {
     @Override
     public void record(LogRecord r) {
         try {
-            out.write(Json.bytes(
-                    LogLine.of(r.topic(), r.partition(), r.offset(), r.timestamp(), r.key(), r.value())));
+            out.write(Json.bytes(LogLine.of(r.topic(), r.partition(), r.offset(), r.timestamp(), r.key(), r.value())));
             out.write('\n');
         } catch (IOException e) {
             throw new ResultFileException(file + ": cannot be written: " + e.getMessage(), e);

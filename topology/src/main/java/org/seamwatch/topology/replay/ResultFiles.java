@@ -66,7 +66,8 @@ public final class ResultFiles implements ReplayOutput {
                 r.topic(),
                 r.partition(),
                 r.offset(),
-                new ReadResult.Unusable<>(r.why().reason(), r.why().field(), r.why().detail()),
+                new ReadResult.Unusable<>(
+                        r.why().reason(), r.why().field(), r.why().detail()),
                 r.key().bytes(),
                 r.value().bytes(),
                 r.value().length() == null ? null : Long.valueOf(r.value().length()),
@@ -148,9 +149,7 @@ public final class ResultFiles implements ReplayOutput {
     }
 
     private static String array(List<?> records) {
-        return records.stream()
-                .map(Json::line)
-                .collect(Collectors.joining(",\n", "[\n", "\n]\n"));
+        return records.stream().map(Json::line).collect(Collectors.joining(",\n", "[\n", "\n]\n"));
     }
 
     private static void finish(Path folder, String name) {
