@@ -19,7 +19,6 @@ import org.apache.kafka.clients.producer.Producer;
 import org.apache.kafka.clients.producer.ProducerConfig;
 import org.apache.kafka.clients.producer.ProducerRecord;
 import org.apache.kafka.common.KafkaException;
-import org.apache.kafka.common.KafkaFuture;
 import org.apache.kafka.common.TopicPartition;
 import org.apache.kafka.common.errors.UnknownTopicOrPartitionException;
 import org.apache.kafka.common.serialization.ByteArraySerializer;
@@ -69,16 +68,19 @@ final class ReportTopic implements AutoCloseable {
     }
 
     private static TopicDescription describe(Admin admin, String topic, String where) {
-        KafkaFuture<TopicDescription> asked =
-                admin.describeTopics(List.of(topic)).topicNameValues().get(topic);
         try {
-            return asked.get(PATIENCE_SECONDS, TimeUnit.SECONDS);
+            return admin.describeTopics(List.of(topic))
+                    .allTopicNames()
+                    .get(PATIENCE_SECONDS, TimeUnit.SECONDS)
+                    .values()
+                    .iterator()
+                    .next();
         } catch (ExecutionException e) {
             if (e.getCause() instanceof UnknownTopicOrPartitionException) {
                 throw new CommandFailure(
                         "no topic " + topic + " at " + where + ": `seamwatch run` makes it at its first start", e);
             }
-            throw new CommandFailure("Kafka at " + where + " cannot be used: " + reason(e.getCause()), e);
+            throw new CommandFailure("Kafka at " + where + " cannot be used: " + reason(e), e);
         } catch (TimeoutException e) {
             throw new CommandFailure(
                     "Kafka at " + where + " does not answer within " + PATIENCE_SECONDS + " seconds", e);
@@ -118,7 +120,8 @@ final class ReportTopic implements AutoCloseable {
     /** The greatest timestamp in the topic, milliseconds since 1970-01-01T00Z; -1 where it is empty. */
     long greatestTimestamp() {
         Map<TopicPartition, OffsetSpec> wanted = description.partitions().stream()
-                .collect(Collectors.toMap(p -> new TopicPartition(topic, p.partition()), p -> OffsetSpec.maxTimestamp()));
+                .collect(Collectors.toMap(
+                        p -> new TopicPartition(topic, p.partition()), p -> OffsetSpec.maxTimestamp()));
         try {
             return admin.listOffsets(wanted).all().get(PATIENCE_SECONDS, TimeUnit.SECONDS).values().stream()
                     .mapToLong(found -> found.timestamp())

@@ -45,7 +45,10 @@ final class SendCommand implements Callable<Integer> {
     @Mixin
     private PlanOption plan = new PlanOption();
 
-    @Parameters(arity = "1..*", paramLabel = "INPUT", description = "reports one a line, in the order to be sent; .gz as is")
+    @Parameters(
+            arity = "1..*",
+            paramLabel = "INPUT",
+            description = "reports one a line, in the order to be sent; .gz as is")
     private List<Path> inputs = new ArrayList<>();
 
     @Option(names = "--history", description = "these are old reports: give them the time they were reported at")
@@ -137,7 +140,8 @@ final class SendCommand implements Callable<Integer> {
 
     private int report(Plan read) {
         if (history && furthestBack > ORDERLY.toMillis()) {
-            console.warn("history must be in time order: a report lies " + Duration.ofMillis(furthestBack).toDays()
+            console.warn("history must be in time order: a report lies "
+                    + Duration.ofMillis(furthestBack).toDays()
                     + " days before one sent earlier, and counts from that one's time on");
         }
         console.say(String.format(
