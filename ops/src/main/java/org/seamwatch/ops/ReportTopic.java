@@ -18,10 +18,12 @@ import org.apache.kafka.clients.producer.KafkaProducer;
 import org.apache.kafka.clients.producer.Producer;
 import org.apache.kafka.clients.producer.ProducerConfig;
 import org.apache.kafka.clients.producer.ProducerRecord;
+import org.apache.kafka.clients.producer.RecordMetadata;
 import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.TopicPartition;
 import org.apache.kafka.common.errors.UnknownTopicOrPartitionException;
 import org.apache.kafka.common.serialization.ByteArraySerializer;
+import org.jspecify.annotations.Nullable;
 import org.seamwatch.processors.flow.Topics;
 import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.plan.Plan;
@@ -37,7 +39,7 @@ final class ReportTopic implements AutoCloseable {
     private final Admin admin;
     private final Producer<byte[], byte[]> producer;
     private final TopicDescription description;
-    private final AtomicReference<Exception> failure = new AtomicReference<>();
+    private final AtomicReference<@Nullable Exception> failure = new AtomicReference<>();
 
     private ReportTopic(
             String topic, String where, Admin admin, Producer<byte[], byte[]> producer, TopicDescription description) {
@@ -139,13 +141,16 @@ final class ReportTopic implements AutoCloseable {
     void send(byte[] key, byte[] value, long timestamp) {
         check();
         try {
-            producer.send(new ProducerRecord<>(topic, null, timestamp, key, value), (sent, e) -> {
-                if (e != null) {
-                    failure.compareAndSet(null, e);
-                }
-            });
+            // A failure comes through the callback; nobody waits for the future.
+            var unused = producer.send(new ProducerRecord<>(topic, null, timestamp, key, value), this::sent);
         } catch (KafkaException e) {
             throw notSent(e);
+        }
+    }
+
+    private void sent(@Nullable RecordMetadata record, @Nullable Exception e) {
+        if (e != null) {
+            failure.compareAndSet(null, e);
         }
     }
 
