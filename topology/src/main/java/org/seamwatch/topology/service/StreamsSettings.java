@@ -1,0 +1,79 @@
+package org.seamwatch.topology.service;
+
+import java.nio.file.Path;
+import java.util.Properties;
+import org.apache.kafka.clients.CommonClientConfigs;
+import org.apache.kafka.clients.consumer.ConsumerConfig;
+import org.apache.kafka.clients.producer.ProducerConfig;
+import org.apache.kafka.common.config.TopicConfig;
+import org.apache.kafka.streams.StreamsConfig;
+import org.seamwatch.schemas.plan.Plan;
+import org.seamwatch.topology.LogTime;
+
+/** Engine properties: ours, then the plan's, then what the flow's guarantees rest on. */
+final class StreamsSettings {
+
+    /** A message to the series or a rejected record with key and value of 256 KiB each, with room to spare. */
+    static final int MAX_REQUEST = 4 << 20;
+
+    private static final int SESSION_MS = 6_000;
+    private static final int HEARTBEAT_MS = 1_500;
+    private static final int COMMIT_MS = 200;
+    private static final int SEGMENT_BYTES = 64 << 20;
+    private static final long CACHE_BYTES = 16L << 20;
+
+    private StreamsSettings() {}
+
+    static Properties of(Plan plan) {
+        Properties p = new Properties();
+        p.put(StreamsConfig.STATE_DIR_CONFIG, defaultStateDir().toString());
+        p.put(StreamsConfig.COMMIT_INTERVAL_MS_CONFIG, COMMIT_MS);
+        p.put(StreamsConfig.STATESTORE_CACHE_MAX_BYTES_CONFIG, CACHE_BYTES);
+        p.put(StreamsConfig.ROCKSDB_CONFIG_SETTER_CLASS_CONFIG, RocksSettings.class);
+        // No result depends on the order between partitions, so no task waits for one.
+        p.put(StreamsConfig.MAX_TASK_IDLE_MS_CONFIG, StreamsConfig.MAX_TASK_IDLE_MS_DISABLED);
+        p.put(StreamsConfig.consumerPrefix(ConsumerConfig.SESSION_TIMEOUT_MS_CONFIG), SESSION_MS);
+        p.put(StreamsConfig.consumerPrefix(ConsumerConfig.HEARTBEAT_INTERVAL_MS_CONFIG), HEARTBEAT_MS);
+        p.put(StreamsConfig.consumerPrefix(ConsumerConfig.MAX_PARTITION_FETCH_BYTES_CONFIG), MAX_REQUEST);
+        p.put(StreamsConfig.producerPrefix(ProducerConfig.MAX_REQUEST_SIZE_CONFIG), MAX_REQUEST);
+        p.put(StreamsConfig.producerPrefix(ProducerConfig.COMPRESSION_TYPE_CONFIG), "lz4");
+        p.put(StreamsConfig.ENABLE_METRICS_PUSH_CONFIG, false);
+        p.putAll(plan.kafka());
+        p.put(StreamsConfig.APPLICATION_ID_CONFIG, ApplicationId.of(plan));
+        p.put(StreamsConfig.NUM_STREAM_THREADS_CONFIG, plan.run().threads());
+        p.put(StreamsConfig.NUM_STANDBY_REPLICAS_CONFIG, plan.run().standbys());
+        p.put(StreamsConfig.REPLICATION_FACTOR_CONFIG, plan.topics().replication());
+        p.put(StreamsConfig.PROCESSING_GUARANTEE_CONFIG, StreamsConfig.EXACTLY_ONCE_V2);
+        p.put(StreamsConfig.DEFAULT_TIMESTAMP_EXTRACTOR_CLASS_CONFIG, LogTime.class);
+        // Replayed time is old, and may be ahead of a broker's clock: no internal topic may mind.
+        p.put(StreamsConfig.topicPrefix(TopicConfig.RETENTION_MS_CONFIG), "-1");
+        p.put(
+                StreamsConfig.topicPrefix(TopicConfig.MESSAGE_TIMESTAMP_AFTER_MAX_MS_CONFIG),
+                Long.toString(Long.MAX_VALUE));
+        p.put(StreamsConfig.topicPrefix(TopicConfig.MESSAGE_TIMESTAMP_TYPE_CONFIG), "CreateTime");
+        // Segments end by size: by their records' time, a replayed year would leave one for each week.
+        p.put(StreamsConfig.topicPrefix(TopicConfig.SEGMENT_MS_CONFIG), Long.toString(Long.MAX_VALUE));
+        p.put(StreamsConfig.topicPrefix(TopicConfig.SEGMENT_BYTES_CONFIG), Integer.toString(SEGMENT_BYTES));
+        return p;
+    }
+
+    /** Properties for plain clients: the plan's that are not the engine's own. */
+    static Properties client(Plan plan) {
+        Properties p = new Properties();
+        plan.kafka().forEach((key, value) -> {
+            if (!StreamsConfig.configDef().names().contains(key) || isCommon(key)) {
+                p.put(key, value);
+            }
+        });
+        return p;
+    }
+
+    private static boolean isCommon(String key) {
+        return key.equals(CommonClientConfigs.BOOTSTRAP_SERVERS_CONFIG)
+                || key.equals(CommonClientConfigs.SECURITY_PROTOCOL_CONFIG);
+    }
+
+    private static Path defaultStateDir() {
+        return Path.of(System.getProperty("user.home", "."), ".seamwatch", "state");
+    }
+}
