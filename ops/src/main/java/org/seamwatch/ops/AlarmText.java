@@ -37,9 +37,11 @@ final class AlarmText {
     static String of(AlarmChange alarm) {
         AlarmText text = new AlarmText(alarm);
         text.head();
-        text.where();
-        text.since();
-        text.sure();
+        if (text.asksForAction()) {
+            text.where();
+            text.since();
+            text.sure();
+        }
         text.data();
         text.response(alarm.response());
         text.row("next", next(alarm.change()));
@@ -51,6 +53,11 @@ final class AlarmText {
         lines.add("ALARM " + word(alarm.change()) + "  " + alarm.alarm() + "  #" + alarm.sequence() + ", day "
                 + alarm.day());
         row("what", evidence.summary());
+    }
+
+    private boolean asksForAction() {
+        Change change = alarm.change();
+        return change == Change.RAISED || change == Change.STRENGTHENED || change == Change.OVERDUE;
     }
 
     /** "Ended" alone could be read as the end of an outbreak. */

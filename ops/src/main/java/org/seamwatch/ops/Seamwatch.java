@@ -26,6 +26,7 @@ import picocli.CommandLine.Spec;
             "2:the input is wrong: a plan, a file, an option",
             "130:interrupted half-way"
         },
+        mixinStandardHelpOptions = true,
         versionProvider = Seamwatch.Version.class,
         scope = CommandLine.ScopeType.INHERIT,
         subcommands = {CheckCommand.class, ReplayCommand.class, SendCommand.class, ScenarioCommand.class})
@@ -33,22 +34,6 @@ public final class Seamwatch implements Callable<Integer> {
 
     @Spec
     private CommandSpec spec = CommandSpec.create();
-
-    @SuppressWarnings("unused") // read by picocli
-    @Option(
-            names = {"-h", "--help"},
-            usageHelp = true,
-            scope = CommandLine.ScopeType.INHERIT,
-            description = "show this help and exit")
-    private boolean help;
-
-    @SuppressWarnings("unused") // read by picocli
-    @Option(
-            names = {"-V", "--version"},
-            versionHelp = true,
-            scope = CommandLine.ScopeType.INHERIT,
-            description = "show the version and exit")
-    private boolean version;
 
     @Option(
             names = "--verbose",
