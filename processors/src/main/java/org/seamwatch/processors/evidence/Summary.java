@@ -33,8 +33,7 @@ final class Summary {
                 + Wording.title(spec.geography().id()) + ": ";
     }
 
-    String of(
-            AlarmMove move, EvidenceInput in, List<Cluster> clusters, List<EvidenceChart> charts, Quality quality) {
+    String of(AlarmMove move, EvidenceInput in, List<Cluster> clusters, List<EvidenceChart> charts, Quality quality) {
         AlarmState alarm = move.alarm();
         if (move.change() == Change.ENDED) {
             return title + "back inside its limits on " + in.day().format(FULL_DAY) + ", after signals from "
@@ -42,8 +41,10 @@ final class Summary {
                     + "; that does not say that anything is over; " + NOT_CONFIRMED;
         }
         if (move.change() == Change.WITHDRAWN && in.planChanged()) {
-            return title + "withdrawn; the plan of this series has changed and learning has begun afresh, so the signals"
-                    + " from " + alarm.start().format(DAY) + " to " + alarm.lastSignal().format(DAY)
+            return title
+                    + "withdrawn; the plan of this series has changed and learning has begun afresh, so the signals"
+                    + " from " + alarm.start().format(DAY) + " to "
+                    + alarm.lastSignal().format(DAY)
                     + " are not followed any further; that does not say that anything is over; what was raised was "
                     + NOT_CONFIRMED;
         }

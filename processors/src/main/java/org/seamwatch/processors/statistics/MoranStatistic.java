@@ -98,9 +98,7 @@ public final class MoranStatistic implements Statistic {
             return MoranReading.without(StatisticStatus.THIN);
         }
         double[] values = measure.values(new MeasureInput(
-                cases,
-                populations == null ? null : regions.pick(populations),
-                regions.pick(input.history())));
+                cases, populations == null ? null : regions.pick(populations), regions.pick(input.history())));
         return GlobalMoran.of(values, regions.weights())
                 .map(moran -> reading(moran, values, regions, input.day()))
                 .orElseGet(() -> MoranReading.without(StatisticStatus.FLAT));

@@ -43,7 +43,8 @@ final class SpecMaker {
         for (SeriesPlan each : plan.series()) {
             Geography geography = geographies.get(each.geography());
             if (geography == null) {
-                throw new IllegalArgumentException("geography of a series must be one of those given, was " + each.geography());
+                throw new IllegalArgumentException(
+                        "geography of a series must be one of those given, was " + each.geography());
             }
             for (String condition : each.conditions()) {
                 specs.add(spec(each, geography, condition));

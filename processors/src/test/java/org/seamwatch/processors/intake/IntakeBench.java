@@ -67,8 +67,9 @@ final class IntakeBench implements IntakeOutput {
     SortedMap<String, Cases> sums() {
         SortedMap<String, Cases> sums = new TreeMap<>();
         for (SeriesMessage.DayChange change : changes()) {
-            change.cells().forEach((region, cases) -> sums.merge(
-                    change.series() + "|" + change.day() + "|" + region, cases, Cases::plus));
+            change.cells()
+                    .forEach((region, cases) ->
+                            sums.merge(change.series() + "|" + change.day() + "|" + region, cases, Cases::plus));
         }
         sums.values().removeIf(Cases::isNone);
         return sums;

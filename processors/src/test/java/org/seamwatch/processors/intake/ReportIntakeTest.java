@@ -33,11 +33,7 @@ class ReportIntakeTest {
         long hour = java.time.Instant.parse(NOON).getEpochSecond() / 3600;
         assertThat(bench.changes())
                 .containsExactly(new SeriesMessage.DayChange(
-                        "gridland/influenza",
-                        hour,
-                        3,
-                        DAY,
-                        new java.util.TreeMap<>(Map.of("R0000", new Cases(4, 0)))));
+                        "gridland/influenza", hour, 3, DAY, new java.util.TreeMap<>(Map.of("R0000", new Cases(4, 0)))));
         assertThat(bench.account().accepted()).isEqualTo(1);
         assertThat(bench.account().controls()).isEqualTo(1);
     }
@@ -99,8 +95,7 @@ class ReportIntakeTest {
         bench.take(NEXT_HOUR, one.count(3).revision(1).with("region", "R0101").day(DAY.minusDays(2)));
         bench.clock("2024-02-03T14:00:00Z");
 
-        assertThat(bench.sums())
-                .containsExactly(Map.entry(cell(DAY.minusDays(2), "R0101"), new Cases(3, 0)));
+        assertThat(bench.sums()).containsExactly(Map.entry(cell(DAY.minusDays(2), "R0101"), new Cases(3, 0)));
         assertThat(bench.changes()).hasSize(3);
     }
 
@@ -142,8 +137,7 @@ class ReportIntakeTest {
         IntakeBench berlin = new IntakeBench(
                 TestDesk.small().zone("Europe/Berlin").dayOf(DayOf.REPORT).watch());
         berlin.take("2024-02-03T23:30:00Z", one.with("reportedAt", "2024-02-03T23:30:00Z"));
-        berlin.take(
-                "2024-02-03T23:30:00Z", Say.of("r-2", "R0001", "2024-02-03").with("reportDate", "2024-02-02"));
+        berlin.take("2024-02-03T23:30:00Z", Say.of("r-2", "R0001", "2024-02-03").with("reportDate", "2024-02-02"));
         berlin.clock("2024-02-04T00:00:00Z");
 
         assertThat(berlin.sums().keySet())
@@ -216,7 +210,10 @@ class ReportIntakeTest {
         bench.clock(NEXT_HOUR);
 
         assertThat(bench.account().accepted()).isEqualTo(1);
-        assertThat(bench.stored() + bench.sent).doesNotContain("Mira").doesNotContain("Weir").contains("lab-1");
+        assertThat(bench.stored() + bench.sent)
+                .doesNotContain("Mira")
+                .doesNotContain("Weir")
+                .contains("lab-1");
         assertThat(bench.rejected).isEmpty();
     }
 }

@@ -155,8 +155,8 @@ public final class TestDesk implements Cloneable {
         for (int column = 0; column < side; column++) {
             for (int row = 0; row < side; row++) {
                 Double people = populated ? 10_000.0 + 1_000 * column + 100 * row : null;
-                regions.add(new Region(
-                        region(column, row), namePrefix + column + " " + row, people, square(column, row)));
+                regions.add(
+                        new Region(region(column, row), namePrefix + column + " " + row, people, square(column, row)));
             }
         }
         GeographyPlan plan = new GeographyPlan(
