@@ -113,9 +113,6 @@ class FinalReportsPropertyTest {
                     .filter(d -> d.moran() != null && d.moran().i() != null)
                     .count();
         }
-        System.out.println(changes.stream()
-                        .collect(java.util.stream.Collectors.groupingBy(c -> c, java.util.stream.Collectors.counting()))
-                + " " + revised + " " + usable);
         assertThat(changes).contains(Change.RAISED, Change.ENDED, Change.WITHDRAWN);
         assertThat(revised).isGreaterThan(1_000);
         assertThat(usable).isGreaterThan(1_000);

@@ -4,6 +4,7 @@ import java.time.Instant;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
@@ -11,6 +12,7 @@ import java.util.Map;
 import java.util.Random;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.function.UnaryOperator;
 import org.seamwatch.processors.intake.Say;
 import org.seamwatch.processors.watch.TestDesk;
 
@@ -94,8 +96,29 @@ final class RandomFeed {
         return log(partitions, arrivals);
     }
 
+    /** The feed as it came, each report said otherwise. */
+    TestLog log(int partitions, UnaryOperator<Say> otherwise) {
+        return log(
+                partitions,
+                arrivals.stream()
+                        .map(a -> new Arrival(a.time(), otherwise.apply(a.say())))
+                        .toList());
+    }
+
     /** The final reports alone, each at noon of its day: what a cold start reads. */
     TestLog finals(int partitions) {
+        List<Arrival> cold = new ArrayList<>();
+        for (Say say : finalReports()) {
+            LocalDate day = LocalDate.parse((String) say.fields().get("eventDate"));
+            Instant noon = day.atTime(12, 0).toInstant(ZoneOffset.UTC);
+            cold.add(new Arrival(noon, say.at(noon)));
+        }
+        cold.sort(Comparator.comparing(Arrival::time));
+        return log(partitions, cold);
+    }
+
+    /** The highest revision of each report, the last to come among equals. */
+    private Collection<Say> finalReports() {
         Map<String, Say> last = new LinkedHashMap<>();
         for (Arrival a : arrivals) {
             Say known = last.get(a.say().id());
@@ -103,14 +126,7 @@ final class RandomFeed {
                 last.put(a.say().id(), a.say());
             }
         }
-        List<Arrival> cold = new ArrayList<>();
-        for (Say say : last.values()) {
-            LocalDate day = LocalDate.parse((String) say.fields().get("eventDate"));
-            Instant noon = day.atTime(12, 0).toInstant(ZoneOffset.UTC);
-            cold.add(new Arrival(noon, say.at(noon)));
-        }
-        cold.sort(Comparator.comparing(Arrival::time));
-        return log(partitions, cold);
+        return last.values();
     }
 
     private static int revision(Say say) {
@@ -120,14 +136,7 @@ final class RandomFeed {
     /** Final counts by series, region and day; none that is zero. */
     SortedMap<String, Long> finalCounts() {
         SortedMap<String, Long> counts = new TreeMap<>();
-        Map<String, Say> last = new LinkedHashMap<>();
-        for (Arrival a : arrivals) {
-            Say known = last.get(a.say().id());
-            if (known == null || revision(a.say()) >= revision(known)) {
-                last.put(a.say().id(), a.say());
-            }
-        }
-        for (Say say : last.values()) {
+        for (Say say : finalReports()) {
             if (!"withdrawn".equals(say.fields().get("status"))) {
                 counts.merge(
                         "gridland/influenza|" + say.fields().get("region") + "|"

@@ -11,6 +11,7 @@ import java.util.function.Predicate;
 import org.seamwatch.processors.alarms.AlarmState;
 import org.seamwatch.processors.flow.SeriesMessage;
 import org.seamwatch.processors.state.MemoryShelf;
+import org.seamwatch.processors.state.Shelf;
 import org.seamwatch.processors.watch.Watch;
 import org.seamwatch.schemas.json.Json;
 import org.seamwatch.schemas.record.AlarmChange;
@@ -22,8 +23,8 @@ final class StageBench implements SeriesOutput {
 
     final MemoryShelf progress = new MemoryShelf();
     final MemoryShelf pending = new MemoryShelf();
-    final MemoryShelf counts = new MemoryShelf();
-    final MemoryShelf days = new MemoryShelf();
+    final Shelf counts;
+    final Shelf days;
     final MemoryShelf books = new MemoryShelf();
     final List<RegionDay> regionDays = new ArrayList<>();
     final List<SeriesDay> seriesDays = new ArrayList<>();
@@ -39,7 +40,13 @@ final class StageBench implements SeriesOutput {
     }
 
     StageBench(Watch watch, Predicate<String> mine) {
+        this(watch, mine, new MemoryShelf(), new MemoryShelf());
+    }
+
+    StageBench(Watch watch, Predicate<String> mine, Shelf counts, Shelf days) {
         this.mine = mine;
+        this.counts = counts;
+        this.days = days;
         this.stage = open(watch);
     }
 
