@@ -7,30 +7,34 @@ import org.jspecify.annotations.Nullable;
 /** Writes compact rows: a version byte, then numbers in base 128 and strings in UTF-8 with their length. */
 public final class ByteWriter {
 
+    private static final int LONGEST_NUMBER = 10;
+
     private byte[] row = new byte[96];
     private int size;
 
     /** Begins a row of a codec's version, 0 to 127. */
     public ByteWriter(int version) {
-        put(version);
+        row[size++] = (byte) version;
     }
 
     /** A number; small magnitudes of either sign take few bytes. */
     public ByteWriter number(long value) {
+        room(LONGEST_NUMBER);
         long zigzag = (value << 1) ^ (value >> 63);
         while ((zigzag & ~0x7FL) != 0) {
-            put((int) ((zigzag & 0x7F) | 0x80));
+            row[size++] = (byte) ((zigzag & 0x7F) | 0x80);
             zigzag >>>= 7;
         }
-        put((int) zigzag);
+        row[size++] = (byte) zigzag;
         return this;
     }
 
     /** A floating-point number, bit for bit. */
     public ByteWriter real(double value) {
+        room(Long.BYTES);
         long bits = Double.doubleToRawLongBits(value);
         for (int shift = 56; shift >= 0; shift -= 8) {
-            put((int) (bits >>> shift));
+            row[size++] = (byte) (bits >>> shift);
         }
         return this;
     }
@@ -57,13 +61,8 @@ public final class ByteWriter {
         return Arrays.copyOf(row, size);
     }
 
-    private void put(int b) {
-        room(1);
-        row[size++] = (byte) b;
-    }
-
     private void room(int more) {
-        if (size + more > row.length) {
+        if (row.length - size < more) {
             row = Arrays.copyOf(row, Math.max(2 * row.length, size + more));
         }
     }

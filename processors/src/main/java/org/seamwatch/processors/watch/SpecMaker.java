@@ -13,7 +13,6 @@ import org.seamwatch.processors.statistics.Board;
 import org.seamwatch.processors.statistics.DayInput;
 import org.seamwatch.processors.statistics.MoranStatistic;
 import org.seamwatch.processors.statistics.Statistic;
-import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.geography.Geography;
 import org.seamwatch.schemas.plan.ChartPlan;
 import org.seamwatch.schemas.plan.ContiguityRule;
@@ -44,7 +43,8 @@ final class SpecMaker {
         for (SeriesPlan each : plan.series()) {
             Geography geography = geographies.get(each.geography());
             if (geography == null) {
-                throw new InputException(plan.file() + ": no geography " + each.geography());
+                throw new IllegalArgumentException(
+                        "geography of a series must be one of those given, was " + each.geography());
             }
             for (String condition : each.conditions()) {
                 specs.add(spec(each, geography, condition));
