@@ -59,4 +59,14 @@ public enum RejectReason {
     public String code() {
         return code;
     }
+
+    /** The reason with this code. */
+    public static RejectReason named(String code) {
+        for (RejectReason reason : values()) {
+            if (reason.code.equals(code)) {
+                return reason;
+            }
+        }
+        throw new IllegalArgumentException("reason must be one of RejectReason's codes, was " + code);
+    }
 }
