@@ -1,5 +1,6 @@
 package org.seamwatch.processors.alarms;
 
+import com.fasterxml.jackson.annotation.JsonIgnore;
 import java.time.LocalDate;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
@@ -53,6 +54,7 @@ public record AlarmState(
     }
 
     /** Whether it waits for its end. */
+    @JsonIgnore
     public boolean isOpen() {
         return !withdrawn && end == null;
     }

@@ -1,5 +1,6 @@
 package org.seamwatch.processors.alarms;
 
+import com.fasterxml.jackson.annotation.JsonIgnore;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
@@ -33,6 +34,7 @@ public record EpisodeState(
     }
 
     /** Whether an episode is under way after the day. */
+    @JsonIgnore
     public boolean isOpen() {
         return start != null && end == null;
     }

@@ -126,7 +126,7 @@ final class ClusterFinder {
         Double people = region.population();
         return new ClusterRegion(
                 region.id(),
-                region.name(),
+                Wording.cut(region.name()),
                 (long) cases[i],
                 Rounding.hundredths(expected[i]),
                 (long) near,

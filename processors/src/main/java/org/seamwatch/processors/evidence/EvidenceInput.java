@@ -11,11 +11,18 @@ import java.util.List;
  * @param history cases of each region on the days that shares are taken from
  * @param preliminary preliminary cases in the period
  * @param late net cases of the period that came after their day had closed
+ * @param planChanged whether the series learns under another plan since the alarm's last signal
  * @param days closed days up to the day, oldest first
  */
 @SuppressWarnings("ArrayRecordComponent") // handed over, never compared
 public record EvidenceInput(
-        LocalDate day, double[] cases, double[] history, long preliminary, long late, List<HistoryRow> days) {
+        LocalDate day,
+        double[] cases,
+        double[] history,
+        long preliminary,
+        long late,
+        boolean planChanged,
+        List<HistoryRow> days) {
 
     public EvidenceInput {
         days = List.copyOf(days);

@@ -57,7 +57,7 @@ public final class EvidenceMaker {
         List<EvidenceChart> charts = charts(in);
         Quality quality = quality(in);
         Evidence evidence = new Evidence(
-                summary.of(move, in.day(), clusters, charts, quality),
+                summary.of(move, in, clusters, charts, quality),
                 new Period(
                         in.day().minusDays(PERIOD_DAYS - 1L),
                         in.day(),
@@ -142,12 +142,9 @@ public final class EvidenceMaker {
     }
 
     private Method method(EvidenceInput in) {
-        SeriesDay last = last(in);
         int fewest = Integer.MAX_VALUE;
         for (Statistic statistic : spec.statistics()) {
-            StatisticDay said = last == null ? null : statistic.said(last);
-            LearningDay learning = said == null ? null : said.learning();
-            fewest = Math.min(fewest, learning == null ? 0 : learning.days());
+            fewest = Math.min(fewest, learningDays(in, statistic));
         }
         return new Method(
                 spec.statistics().stream().map(Statistic::words).toList(),
@@ -155,5 +152,16 @@ public final class EvidenceMaker {
                 spec.budget().series(),
                 fewest,
                 fewest < YOUNG_BELOW_DAYS);
+    }
+
+    /** Days that had taught when the newest usable day was judged. */
+    private static int learningDays(EvidenceInput in, Statistic statistic) {
+        for (int i = in.days().size() - 1; i >= 0; i--) {
+            StatisticDay said = statistic.said(in.days().get(i).day());
+            if (said != null && said.learning() != null) {
+                return said.learning().days();
+            }
+        }
+        return 0;
     }
 }

@@ -33,12 +33,20 @@ final class Summary {
                 + Wording.title(spec.geography().id()) + ": ";
     }
 
-    String of(AlarmMove move, LocalDate day, List<Cluster> clusters, List<EvidenceChart> charts, Quality quality) {
+    String of(AlarmMove move, EvidenceInput in, List<Cluster> clusters, List<EvidenceChart> charts, Quality quality) {
         AlarmState alarm = move.alarm();
         if (move.change() == Change.ENDED) {
-            return title + "back inside its limits on " + day.format(FULL_DAY) + ", after signals from "
+            return title + "back inside its limits on " + in.day().format(FULL_DAY) + ", after signals from "
                     + alarm.start().format(DAY) + " to " + alarm.lastSignal().format(DAY)
                     + "; that does not say that anything is over; " + NOT_CONFIRMED;
+        }
+        if (move.change() == Change.WITHDRAWN && in.planChanged()) {
+            return title
+                    + "withdrawn; the plan of this series has changed and learning has begun afresh, so the signals"
+                    + " from " + alarm.start().format(DAY) + " to "
+                    + alarm.lastSignal().format(DAY)
+                    + " are not followed any further; that does not say that anything is over; what was raised was "
+                    + NOT_CONFIRMED;
         }
         if (move.change() == Change.WITHDRAWN) {
             return title + "withdrawn; with the reports as they now stand no signal is left between "
@@ -49,7 +57,7 @@ final class Summary {
                 ? "open for " + ChronoUnit.DAYS.between(alarm.start(), move.day()) + " days without a verdict; "
                 : "";
         return title + open + places(clusters, quality) + " in the " + EvidenceMaker.PERIOD_DAYS + " days to "
-                + day.format(FULL_DAY) + " by " + spec.plan().dayOf().word() + " date" + since(charts) + "; "
+                + in.day().format(FULL_DAY) + " by " + spec.plan().dayOf().word() + " date" + since(charts) + "; "
                 + view(quality) + "; " + NOT_CONFIRMED;
     }
 

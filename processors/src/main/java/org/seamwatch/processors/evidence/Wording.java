@@ -6,6 +6,8 @@ import java.util.Locale;
 /** Small pieces of plain English. */
 final class Wording {
 
+    private static final int LONGEST_NAME = 120;
+
     private Wording() {}
 
     /** An id as a title: {@code hand-foot-mouth} becomes {@code Hand foot mouth}, {@code covid-19} {@code Covid-19}. */
@@ -40,6 +42,14 @@ final class Wording {
         }
         int last = names.size() - 1;
         return String.join(", ", names.subList(0, last)) + " and " + names.get(last);
+    }
+
+    /** A name at its whole length, or its beginning where it is longer than any name should be. */
+    static String cut(String name) {
+        if (name.codePointCount(0, name.length()) <= LONGEST_NAME) {
+            return name;
+        }
+        return name.substring(0, name.offsetByCodePoints(0, LONGEST_NAME - 1)) + "\u2026";
     }
 
     static String statistic(String name) {

@@ -2,6 +2,7 @@ package org.seamwatch.processors.intake;
 
 import java.time.Instant;
 import java.time.LocalDate;
+import java.util.ArrayList;
 import java.util.List;
 import org.seamwatch.processors.watch.SeriesSpec;
 import org.seamwatch.processors.watch.Watch;
@@ -20,24 +21,28 @@ final class Horizon {
         this.watch = watch;
     }
 
-    /** Whether every day a report counts in lies beyond the horizon. Series that left the plan do not keep it. */
-    boolean isBeyond(List<Contribution> contributions, long time) {
+    /**
+     * The contributions whose day lies within the horizon; the others are neither made nor taken back. None where the
+     * report is too old. Those to series that left the plan are dropped.
+     */
+    List<Contribution> within(List<Contribution> contributions, long time) {
         int longest = 0;
         for (Contribution c : contributions) {
             SeriesSpec spec = watch.series().get(c.series());
             longest = spec == null ? longest : Math.max(longest, spec.plan().reviseForDays());
         }
         Instant now = Instant.ofEpochMilli(time);
+        List<Contribution> within = new ArrayList<>(contributions.size());
         for (Contribution c : contributions) {
             SeriesSpec spec = watch.series().get(c.series());
-            if (spec == null) {
-                continue;
-            }
-            LocalDate oldest = now.atZone(spec.zone()).toLocalDate().minusDays(longest + (long) EXTRA_DAYS);
-            if (!c.day().isBefore(oldest)) {
-                return false;
+            if (spec != null && !c.day().isBefore(oldest(now, spec, longest))) {
+                within.add(c);
             }
         }
-        return true;
+        return within;
+    }
+
+    private static LocalDate oldest(Instant now, SeriesSpec spec, int reviseForDays) {
+        return now.atZone(spec.zone()).toLocalDate().minusDays(reviseForDays + (long) EXTRA_DAYS);
     }
 }

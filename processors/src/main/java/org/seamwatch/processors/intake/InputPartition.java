@@ -52,6 +52,23 @@ final class InputPartition {
         }
     }
 
+    /**
+     * Passes every hour up to one without a record, where a log is known to hold no more records of them.
+     *
+     * @param last the last hour to be passed
+     * @param logStart first timestamp of the log, for a partition that has had no record yet
+     */
+    void pass(long last, long logStart, HourEnd end) {
+        boolean quiet = account.time() < 0;
+        if (!quiet && hour() > last) {
+            return;
+        }
+        if (!quiet) {
+            end.passed(hour());
+        }
+        out.toAll(new Watermark(topic, partition, last, quiet ? logStart : account.firstTimestamp(), sizes));
+    }
+
     /** The hour of the partition's time. */
     long hour() {
         return Hours.of(account.time());

@@ -1,5 +1,6 @@
 package org.seamwatch.processors.intake;
 
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.seamwatch.processors.state.Shelf;
 
@@ -14,7 +15,7 @@ final class Ledger {
         this.horizon = horizon;
     }
 
-    /** What the report last said, unless that lies beyond the horizon at this time. */
+    /** What the report last said, as far as that lies within the horizon at this time; null where nothing does. */
     @Nullable
     LedgerEntry get(String reportId, long time) {
         byte @Nullable [] row = rows.get(reportId);
@@ -22,7 +23,8 @@ final class Ledger {
             return null;
         }
         LedgerEntry entry = LedgerEntry.from(reportId, row);
-        return horizon.isBeyond(entry.contributions(), time) ? null : entry;
+        List<Contribution> within = horizon.within(entry.contributions(), time);
+        return within.isEmpty() ? null : entry.with(within);
     }
 
     void put(LedgerEntry entry) {
@@ -32,7 +34,8 @@ final class Ledger {
     /** Removes what lies beyond the horizon. */
     void sweep(long time) {
         rows.visit((reportId, row) -> {
-            if (horizon.isBeyond(LedgerEntry.from(reportId, row).contributions(), time)) {
+            if (horizon.within(LedgerEntry.from(reportId, row).contributions(), time)
+                    .isEmpty()) {
                 rows.remove(reportId);
             }
         });

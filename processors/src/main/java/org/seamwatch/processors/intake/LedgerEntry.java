@@ -35,6 +35,10 @@ record LedgerEntry(CaseReport report, String region, List<Contribution> contribu
         return new Cases(report.count(), report.status() == ReportStatus.PRELIMINARY ? report.count() : 0);
     }
 
+    LedgerEntry with(List<Contribution> newContributions) {
+        return new LedgerEntry(report, region, newContributions);
+    }
+
     byte[] row() {
         CaseReport r = report;
         ByteWriter out = new ByteWriter(VERSION);

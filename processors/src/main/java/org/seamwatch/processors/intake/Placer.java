@@ -20,8 +20,11 @@ final class Placer {
 
     private final Watch watch;
 
-    Placer(Watch watch) {
+    private final Horizon horizon;
+
+    Placer(Watch watch, Horizon horizon) {
         this.watch = watch;
+        this.horizon = horizon;
     }
 
     /** Either the entry a report makes, or why it makes none. */
@@ -36,7 +39,13 @@ final class Placer {
         }
     }
 
-    Placing place(CaseReport report, long timestamp) {
+    /**
+     * Places a report.
+     *
+     * @param timestamp the record's, which the report's dates must not be ahead of
+     * @param time the partition's, which they must not lie too far behind
+     */
+    Placing place(CaseReport report, long timestamp, long time) {
         Instant logTime = Instant.ofEpochMilli(timestamp);
         if (report.reportedAt().isAfter(logTime.plus(CLOCK_TOLERANCE))) {
             return no(
@@ -53,6 +62,10 @@ final class Placer {
         if (series.isEmpty()) {
             return unrouted(report, region);
         }
+        return placed(report, region, series, logTime, time);
+    }
+
+    private Placing placed(CaseReport report, String region, List<SeriesSpec> series, Instant logTime, long time) {
         List<Contribution> contributions = new ArrayList<>(series.size());
         for (SeriesSpec spec : series) {
             LocalDate day = day(report, spec);
@@ -60,12 +73,20 @@ final class Placer {
             if (day.isAfter(latest)) {
                 return no(
                         RejectReason.FUTURE_DAY,
-                        spec.plan().dayOf() == DayOf.EVENT || report.reportDate() == null ? "eventDate" : "reportDate",
+                        field(report, spec),
                         "the report's day must be at most one day after the log's date, was " + day);
             }
             contributions.add(new Contribution(spec.id(), day));
         }
-        return new Placing(new LedgerEntry(report, region, contributions), null);
+        List<Contribution> within = horizon.within(contributions, time);
+        if (within.isEmpty()) {
+            return no(
+                    RejectReason.TOO_OLD,
+                    field(report, series.get(0)),
+                    "the report's day must lie within the ledger's horizon, was "
+                            + contributions.get(0).day());
+        }
+        return new Placing(new LedgerEntry(report, region, within), null);
     }
 
     private @Nullable String region(CaseReport report) {
@@ -99,6 +120,14 @@ final class Placer {
         }
         LocalDate given = report.reportDate();
         return given != null ? given : report.reportedAt().atZone(spec.zone()).toLocalDate();
+    }
+
+    /** The field that {@link #day} is taken from. */
+    private static String field(CaseReport report, SeriesSpec spec) {
+        if (spec.plan().dayOf() == DayOf.EVENT) {
+            return "eventDate";
+        }
+        return report.reportDate() == null ? "reportedAt" : "reportDate";
     }
 
     private static Placing no(RejectReason reason, String field, String detail) {

@@ -24,7 +24,6 @@ public final class ReportIntake {
     private final Ledger ledger;
     private final HourTally tally;
     private final Placer placer;
-    private final Horizon horizon;
     private final IntakeOutput out;
 
     /**
@@ -38,10 +37,10 @@ public final class ReportIntake {
             Watch watch, int partition, InputSizes sizes, Shelf ledger, Shelf tally, Shelf accounts, IntakeOutput out) {
         this.partition = partition;
         this.input = new InputPartition(Topics.CASE_REPORTS, partition, sizes, accounts, out);
-        this.horizon = new Horizon(watch);
+        Horizon horizon = new Horizon(watch);
         this.ledger = new Ledger(ledger, horizon);
         this.tally = new HourTally(tally);
-        this.placer = new Placer(watch);
+        this.placer = new Placer(watch, horizon);
         this.out = out;
     }
 
@@ -57,6 +56,17 @@ public final class ReportIntake {
             }
         }
         input.save();
+    }
+
+    /**
+     * Passes every hour up to one without a record: for a replay that knows that the log holds no more of them.
+     *
+     * @param hour the last hour to be passed
+     * @param logStart first timestamp of the log, milliseconds since 1970-01-01T00Z; counts where the partition has
+     *     had no record yet
+     */
+    public void pass(long hour, long logStart) {
+        input.pass(hour, logStart, ended -> tally.end(ended, partition, out));
     }
 
     private void endHour(long hour) {
@@ -89,17 +99,11 @@ public final class ReportIntake {
     }
 
     private @Nullable Refusal take(CaseReport report, long timestamp) {
-        Placer.Placing placing = placer.place(report, timestamp);
+        Placer.Placing placing = placer.place(report, timestamp, input.time());
         if (placing.why() != null) {
             return placing.why();
         }
         LedgerEntry now = placing.entry();
-        if (horizon.isBeyond(now.contributions(), input.time())) {
-            return new Refusal(
-                    RejectReason.TOO_OLD,
-                    "eventDate",
-                    "the report's day " + now.contributions().get(0).day() + " lies beyond the ledger's horizon");
-        }
         LedgerEntry before = ledger.get(report.reportId(), input.time());
         if (before != null && report.revision() < before.report().revision()) {
             input.account().supersede();

@@ -45,6 +45,17 @@ public final class ResponseIntake {
         input.save();
     }
 
+    /**
+     * Passes every hour up to one without a record: for a replay that knows that the log holds no more of them.
+     *
+     * @param hour the last hour to be passed
+     * @param logStart first timestamp of the log, milliseconds since 1970-01-01T00Z; counts where the partition has
+     *     had no record yet
+     */
+    public void pass(long hour, long logStart) {
+        input.pass(hour, logStart, ended -> {});
+    }
+
     private @Nullable Refusal take(LogRecord record) {
         byte @Nullable [] key = record.key();
         byte @Nullable [] value = record.value();

@@ -51,7 +51,7 @@ final class Closing {
      * @param alarms every alarm of the series
      */
     List<AlarmMove> close(SeriesBook book, LocalDate last, long hour, Collection<AlarmState> alarms) {
-        LocalDate first = book.dirtyFrom() == null ? book.nextDay() : book.dirtyFrom();
+        LocalDate first = book.firstToJudge();
         emitLateChanges(book, first, hour);
         List<EpisodeState> episodes = new ArrayList<>();
         DayState before = first.isAfter(book.learnsFrom()) ? days.get(first.minusDays(1)) : null;
@@ -65,7 +65,7 @@ final class Closing {
     private DayState judge(SeriesBook book, LocalDate day, @Nullable DayState before, long hour) {
         DayState known = days.get(day);
         DayState now = judge.judge(
-                day, counts.total(day), () -> counts.input(day, book.begins()), before, known, book.changed());
+                day, counts.total(day), () -> counts.input(day, book.begins()), before, known, book.countedAnew());
         DayCounts dayCounts = counts.get(day);
         boolean recounted = !dayCounts.stale().isEmpty();
         SeriesDay said = now.day();
@@ -97,7 +97,10 @@ final class Closing {
             if (day.isBefore(first)) {
                 DayCounts dayCounts = counts.get(day);
                 if (!dayCounts.stale().isEmpty()) {
-                    emitRegions(day, dayCounts, dayCounts.revision() + 1, hour);
+                    DayState said = days.get(day);
+                    int revision = Math.max(
+                            dayCounts.revision(), said == null ? -1 : said.day().revision());
+                    emitRegions(day, dayCounts, revision + 1, hour);
                 }
             }
         }
@@ -131,6 +134,7 @@ final class Closing {
                         counts.history(day, book.begins()),
                         preliminary,
                         late,
+                        move.alarm().lastSignal().isBefore(book.learnsFrom()),
                         history(day)));
     }
 

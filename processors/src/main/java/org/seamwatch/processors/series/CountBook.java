@@ -61,7 +61,7 @@ final class CountBook {
             get(d).cells().forEach((region, cell) -> {
                 int i = spec.ground().index(region);
                 if (i >= 0) {
-                    cases[i] = cell.cases().count();
+                    cases[i] = cell.count();
                 }
             });
             return cases;

@@ -23,8 +23,13 @@ final class DayCounts {
      */
     record Cell(Cases cases, long emitted) {
 
+        /** The count; never negative, even where another plan has let rows go that a correction takes back. */
+        long count() {
+            return Math.max(0, cases.count());
+        }
+
         boolean isStale() {
-            return cases.count() != emitted;
+            return count() != emitted;
         }
     }
 
@@ -90,15 +95,15 @@ final class DayCounts {
     }
 
     long count(String region) {
-        return cells.getOrDefault(region, EMPTY).cases().count();
+        return cells.getOrDefault(region, EMPTY).count();
     }
 
     /** Says that all stale regions are emitted now, as a revision. */
     void emitted(int newRevision) {
         revision = newRevision;
         for (String region : stale()) {
-            Cases cases = cells.getOrDefault(region, EMPTY).cases();
-            put(region, new Cell(cases, cases.count()));
+            Cell cell = cells.getOrDefault(region, EMPTY);
+            put(region, new Cell(cell.cases(), cell.count()));
         }
     }
 
@@ -114,9 +119,5 @@ final class DayCounts {
 
     long preliminary() {
         return cells.values().stream().mapToLong(c -> c.cases().preliminary()).sum();
-    }
-
-    long total() {
-        return cells.values().stream().mapToLong(c -> c.cases().count()).sum();
     }
 }

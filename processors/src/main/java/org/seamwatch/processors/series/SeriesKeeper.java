@@ -34,6 +34,7 @@ final class SeriesKeeper {
     private final AlarmShelf alarms;
     private final Closing closing;
     private SeriesBook book;
+    private long nextClose;
 
     private SeriesKeeper(Watch watch, SeriesSpec spec, SeriesShelves shelves, SeriesOutput out, SeriesBook book) {
         this.spec = spec;
@@ -44,6 +45,7 @@ final class SeriesKeeper {
         this.alarms = new AlarmShelf(spec.id(), shelves.books());
         this.closing = new Closing(watch, spec, counts, days, out);
         this.book = book;
+        this.nextClose = closesAt(book.nextDay());
     }
 
     /**
@@ -80,7 +82,7 @@ final class SeriesKeeper {
         if (past && changed) {
             LocalDate today = Hours.end(change.hour() - 1).atZone(spec.zone()).toLocalDate();
             boolean young = !day.isBefore(today.minusDays(spec.plan().reviseForDays()));
-            book = book.changed(day, young && !day.isBefore(book.learnsFrom()));
+            book = book.changed(day, young);
         }
     }
 
@@ -106,7 +108,8 @@ final class SeriesKeeper {
             follow(move, hour);
         }
         forget(last);
-        book = book.closed(last);
+        book = book.closed(book.firstToJudge(), last, last.minusDays(spec.keepDays()));
+        nextClose = closesAt(book.nextDay());
         counts.rest();
         return true;
     }
@@ -117,9 +120,12 @@ final class SeriesKeeper {
     }
 
     private @Nullable LocalDate lastDue(long hour) {
-        LocalDate last = null;
-        for (LocalDate day = book.nextDay(); closesAt(day) <= hour; day = day.plusDays(1)) {
-            last = day;
+        if (nextClose > hour) {
+            return null;
+        }
+        LocalDate last = book.nextDay();
+        while (closesAt(last.plusDays(1)) <= hour) {
+            last = last.plusDays(1);
         }
         return last;
     }

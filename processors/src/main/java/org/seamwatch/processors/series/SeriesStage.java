@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -69,7 +70,7 @@ public final class SeriesStage {
     }
 
     private static String prefix(long hour) {
-        return String.format("%012d|", hour);
+        return String.format(Locale.ROOT, "%012d|", hour);
     }
 
     private void applyPassedHours() {

@@ -1,36 +1,40 @@
 package org.seamwatch.processors.state;
 
-import java.io.ByteArrayOutputStream;
 import java.nio.charset.StandardCharsets;
+import java.util.Arrays;
 import org.jspecify.annotations.Nullable;
 
 /** Writes compact rows: a version byte, then numbers in base 128 and strings in UTF-8 with their length. */
 public final class ByteWriter {
 
-    private final ByteArrayOutputStream out;
+    private static final int LONGEST_NUMBER = 10;
+
+    private byte[] row = new byte[96];
+    private int size;
 
     /** Begins a row of a codec's version, 0 to 127. */
     public ByteWriter(int version) {
-        out = new ByteArrayOutputStream(96);
-        out.write(version);
+        row[size++] = (byte) version;
     }
 
     /** A number; small magnitudes of either sign take few bytes. */
     public ByteWriter number(long value) {
+        room(LONGEST_NUMBER);
         long zigzag = (value << 1) ^ (value >> 63);
         while ((zigzag & ~0x7FL) != 0) {
-            out.write((int) ((zigzag & 0x7F) | 0x80));
+            row[size++] = (byte) ((zigzag & 0x7F) | 0x80);
             zigzag >>>= 7;
         }
-        out.write((int) zigzag);
+        row[size++] = (byte) zigzag;
         return this;
     }
 
     /** A floating-point number, bit for bit. */
     public ByteWriter real(double value) {
+        room(Long.BYTES);
         long bits = Double.doubleToRawLongBits(value);
         for (int shift = 56; shift >= 0; shift -= 8) {
-            out.write((int) (bits >>> shift));
+            row[size++] = (byte) (bits >>> shift);
         }
         return this;
     }
@@ -39,7 +43,9 @@ public final class ByteWriter {
     public ByteWriter text(String value) {
         byte[] utf8 = value.getBytes(StandardCharsets.UTF_8);
         number(utf8.length);
-        out.write(utf8, 0, utf8.length);
+        room(utf8.length);
+        System.arraycopy(utf8, 0, row, size, utf8.length);
+        size += utf8.length;
         return this;
     }
 
@@ -52,6 +58,12 @@ public final class ByteWriter {
     }
 
     public byte[] bytes() {
-        return out.toByteArray();
+        return Arrays.copyOf(row, size);
+    }
+
+    private void room(int more) {
+        if (row.length - size < more) {
+            row = Arrays.copyOf(row, Math.max(2 * row.length, size + more));
+        }
     }
 }

@@ -9,7 +9,24 @@ import org.jspecify.annotations.Nullable;
 /** Rows in memory, for replays. */
 public final class MemoryShelf implements Shelf {
 
-    private final TreeMap<String, byte[]> rows = new TreeMap<>();
+    private final TreeMap<String, byte[]> rows = new TreeMap<>(MemoryShelf::compareBytes);
+
+    /**
+     * The order of the keys' bytes in UTF-8, which is that of their code points. It differs from the order of Java's
+     * chars only where one of two chars that differ is half of a pair.
+     */
+    private static int compareBytes(String a, String b) {
+        int shorter = Math.min(a.length(), b.length());
+        for (int i = 0; i < shorter; i++) {
+            char x = a.charAt(i);
+            char y = b.charAt(i);
+            if (x != y) {
+                boolean oneIsHalf = Character.isSurrogate(x) != Character.isSurrogate(y);
+                return oneIsHalf ? Character.isSurrogate(x) ? 1 : -1 : Character.compare(x, y);
+            }
+        }
+        return Integer.compare(a.length(), b.length());
+    }
 
     @Override
     public byte @Nullable [] get(String key) {
@@ -40,7 +57,8 @@ public final class MemoryShelf implements Shelf {
 
     @Override
     public void visit(RowVisitor visitor) {
-        new ArrayList<>(rows.entrySet()).forEach(e -> visitor.row(e.getKey(), e.getValue()));
+        // A copy: entries of the map itself change under the visitor when rows are removed.
+        rows("").forEach(row -> visitor.row(row.key(), row.value()));
     }
 
     /** How many rows there are. */

@@ -86,18 +86,19 @@ public final class MoranStatistic implements Statistic {
 
     @Override
     public Reading read(DayInput input) {
-        StatisticStatus unusable = unusable(input);
-        if (unusable != null) {
-            return MoranReading.without(unusable);
+        if (unjudgedPart(input.unjudged()) > MOST_UNJUDGED) {
+            return MoranReading.without(StatisticStatus.INCOMPLETE);
         }
         Subset regions = anyTrue(input.unjudged()) ? weights.without(input.unjudged()) : everywhere;
         if (regions.size() == 0) {
             return MoranReading.without(StatisticStatus.FLAT);
         }
+        double[] cases = regions.pick(input.cases());
+        if (isYoung(input) || Arrays.stream(cases).sum() < plan.thinBelow()) {
+            return MoranReading.without(StatisticStatus.THIN);
+        }
         double[] values = measure.values(new MeasureInput(
-                regions.pick(input.cases()),
-                populations == null ? null : regions.pick(populations),
-                regions.pick(input.history())));
+                cases, populations == null ? null : regions.pick(populations), regions.pick(input.history())));
         return GlobalMoran.of(values, regions.weights())
                 .map(moran -> reading(moran, values, regions, input.day()))
                 .orElseGet(() -> MoranReading.without(StatisticStatus.FLAT));
@@ -111,12 +112,8 @@ public final class MoranStatistic implements Statistic {
         return new MoranReading(StatisticStatus.USABLE, moran, plan.permutations(), p);
     }
 
-    private @Nullable StatisticStatus unusable(DayInput input) {
-        if (unjudgedPart(input.unjudged()) > MOST_UNJUDGED) {
-            return StatisticStatus.INCOMPLETE;
-        }
-        boolean young = measure.name().equals(NEEDS_HISTORY) && input.historyDays() < DayInput.LEAST_HISTORY;
-        return young || Arrays.stream(input.cases()).sum() < plan.thinBelow() ? StatisticStatus.THIN : null;
+    private boolean isYoung(DayInput input) {
+        return measure.name().equals(NEEDS_HISTORY) && input.historyDays() < DayInput.LEAST_HISTORY;
     }
 
     private double unjudgedPart(boolean[] unjudged) {

@@ -13,7 +13,6 @@ import org.seamwatch.processors.statistics.Board;
 import org.seamwatch.processors.statistics.DayInput;
 import org.seamwatch.processors.statistics.MoranStatistic;
 import org.seamwatch.processors.statistics.Statistic;
-import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.geography.Geography;
 import org.seamwatch.schemas.plan.ChartPlan;
 import org.seamwatch.schemas.plan.ContiguityRule;
@@ -44,7 +43,8 @@ final class SpecMaker {
         for (SeriesPlan each : plan.series()) {
             Geography geography = geographies.get(each.geography());
             if (geography == null) {
-                throw new InputException(plan.file() + ": no geography " + each.geography());
+                throw new IllegalArgumentException(
+                        "geography of a series must be one of those given, was " + each.geography());
             }
             for (String condition : each.conditions()) {
                 specs.add(spec(each, geography, condition));
@@ -87,7 +87,8 @@ final class SpecMaker {
     private Statistic statistic(StatisticName name, String series, SeriesPlan each, Ground ground, Budget budget) {
         List<ChartPlan> plans = each.charts().getOrDefault(name, name.defaultCharts());
         double share = budget.chart(each, name);
-        List<Chart> charts = plans.stream().map(p -> chart(p, share)).toList();
+        List<Chart> charts =
+                plans.stream().map(p -> chart(series, name, p, share)).toList();
         Board board = new Board(Learner.of(plans.get(0).order()), charts, each.warmUpDays());
         return switch (name) {
             case MORAN ->
@@ -96,10 +97,15 @@ final class SpecMaker {
         };
     }
 
-    private static Chart chart(ChartPlan plan, double falseAlarmsPerYear) {
-        if (plan instanceof ChartPlan.Ewma ewma) {
-            return EwmaChart.of(ewma.weight(), ewma.sides(), falseAlarmsPerYear);
+    private Chart chart(String series, StatisticName statistic, ChartPlan chart, double falseAlarmsPerYear) {
+        try {
+            if (chart instanceof ChartPlan.Ewma ewma) {
+                return EwmaChart.of(ewma.weight(), ewma.sides(), falseAlarmsPerYear);
+            }
+            return IndividualsChart.of(chart.sides(), falseAlarmsPerYear);
+        } catch (IllegalArgumentException e) {
+            throw new InputException(plan.file() + ": series " + series + ": " + chart.name() + " chart of "
+                    + statistic.word() + ": " + e.getMessage());
         }
-        return IndividualsChart.of(plan.sides(), falseAlarmsPerYear);
     }
 }

@@ -69,6 +69,18 @@ class DistanceContiguityTest {
     }
 
     @Test
+    void shouldTakeDistancesThatDifferByRoundingForTies() {
+        List<Geometry> row = new ArrayList<>();
+        for (int x = 0; x < 60; x++) {
+            row.add(Shapes.box(7 + 0.1 * x - 0.01, 50, 7 + 0.1 * x + 0.01, 50.1));
+        }
+        Centres centres = new Centres(row);
+        for (int i = 1; i < row.size(); i++) {
+            assertThat(centres.nearest(i, 1).get(0).region()).isEqualTo(i - 1);
+        }
+    }
+
+    @Test
     void shouldIncludeTheDistanceItself() {
         List<Geometry> pair = List.of(Shapes.box(-0.5, -0.5, 0.5, 0.5), Shapes.box(0.5, -0.5, 1.5, 0.5));
         double apart = GreatCircle.kilometres(new Coordinate(0, 0), new Coordinate(1, 0));

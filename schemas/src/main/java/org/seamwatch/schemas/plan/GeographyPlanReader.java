@@ -28,7 +28,7 @@ final class GeographyPlanReader {
                 map.text("regionName", "name"),
                 population == null ? null : population.text(),
                 year == null ? null : year.integer(1900, 2200),
-                map.text("regions", "*"),
+                map.patterns("regions"),
                 tolerance(map.get("tolerance")));
     }
 

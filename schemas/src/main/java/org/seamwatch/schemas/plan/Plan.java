@@ -1,8 +1,10 @@
 package org.seamwatch.schemas.plan;
 
 import java.nio.file.Path;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 
 /**
  * A whole plan.
@@ -25,7 +27,8 @@ public record Plan(
         List<SeriesPlan> series) {
 
     public Plan {
-        kafka = Map.copyOf(kafka);
+        // In the order of their names; the order of Map.copyOf differs from run to run.
+        kafka = Collections.unmodifiableMap(new TreeMap<>(kafka));
         geographies = List.copyOf(geographies);
         series = List.copyOf(series);
     }

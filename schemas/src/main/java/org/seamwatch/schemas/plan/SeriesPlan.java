@@ -1,8 +1,10 @@
 package org.seamwatch.schemas.plan;
 
 import java.time.LocalDate;
+import java.util.Collections;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -48,7 +50,8 @@ public record SeriesPlan(
     public SeriesPlan {
         conditions = List.copyOf(conditions);
         statistics = List.copyOf(statistics);
-        charts = Map.copyOf(charts);
+        // In the order of the statistics; the order of Map.copyOf differs from run to run.
+        charts = Collections.unmodifiableMap(new TreeMap<>(charts));
         holidays = List.copyOf(holidays);
     }
 }

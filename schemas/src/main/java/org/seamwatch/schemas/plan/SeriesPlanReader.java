@@ -76,7 +76,7 @@ final class SeriesPlanReader {
         }
         List<StatisticName> statistics = new ArrayList<>();
         for (YamlValue item : value.filledList()) {
-            StatisticName name = choice(item, "statistic", StatisticName.values(), StatisticName::word, null);
+            StatisticName name = choice(item, "statistic", StatisticName.values(), StatisticName::word);
             if (statistics.contains(name)) {
                 throw item.rule("must be there once, is \"" + name.word() + "\" again");
             }
@@ -93,7 +93,7 @@ final class SeriesPlanReader {
         for (YamlValue item : value.list()) {
             if (item.isMap()) {
                 YamlMap map = item.map().only(List.of("day", "regions"));
-                holidays.add(new HolidayPlan(map.required("day").date(), map.text("regions", "*")));
+                holidays.add(new HolidayPlan(map.required("day").date(), map.patterns("regions")));
             } else {
                 holidays.add(new HolidayPlan(item.date(), "*"));
             }
@@ -102,14 +102,11 @@ final class SeriesPlanReader {
     }
 
     /** The constant whose word is written, or the default where nothing is. */
-    static <E> E choice(
-            @Nullable YamlValue value, String what, E[] constants, Function<E, String> word, @Nullable E otherwise) {
-        if (value == null && otherwise != null) {
-            return otherwise;
-        }
-        if (value == null) {
-            throw new IllegalArgumentException("a " + what + " must be there or have a default");
-        }
+    static <E> E choice(@Nullable YamlValue value, String what, E[] constants, Function<E, String> word, E otherwise) {
+        return value == null ? otherwise : choice(value, what, constants, word);
+    }
+
+    private static <E> E choice(YamlValue value, String what, E[] constants, Function<E, String> word) {
         List<String> words = Arrays.stream(constants).map(word).toList();
         return constants[words.indexOf(value.word(what, words))];
     }

@@ -98,6 +98,12 @@ final class YamlMap {
         return value == null ? otherwise : value.text();
     }
 
+    /** Patterns of region ids; all regions where the key is absent. */
+    String patterns(String key) {
+        YamlValue value = values.get(key);
+        return value == null ? "*" : value.patterns();
+    }
+
     int integer(String key, int lowest, int highest, int otherwise) {
         YamlValue value = values.get(key);
         return value == null ? otherwise : value.integer(lowest, highest);

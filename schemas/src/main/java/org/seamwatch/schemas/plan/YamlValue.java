@@ -161,6 +161,15 @@ final class YamlValue {
         return id;
     }
 
+    /** Patterns of region ids: at least one, with {@code *} for any characters and commas between them. */
+    String patterns() {
+        String patterns = text();
+        if (patterns.replace(",", "").isBlank()) {
+            throw rule("must have patterns like 05*, was " + quoted(patterns));
+        }
+        return patterns;
+    }
+
     /** One of some words. */
     String word(String what, List<String> known) {
         String word = text();

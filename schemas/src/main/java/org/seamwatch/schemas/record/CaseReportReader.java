@@ -21,7 +21,7 @@ public final class CaseReportReader {
                     "reportDate",
                     "reportedAt",
                     "count")
-            .withObject("position", KnownFields.of("lon", "lat"));
+            .withObject("position", "lon", "lat");
     private static final FieldReader.Words<ReportStatus> STATUSES = new FieldReader.Words<>(ReportStatus.class);
 
     private CaseReportReader() {}

@@ -2,6 +2,7 @@ package org.seamwatch.schemas.record;
 
 import com.fasterxml.jackson.core.JsonParser;
 import com.fasterxml.jackson.core.JsonToken;
+import com.fasterxml.jackson.core.exc.StreamConstraintsException;
 import java.io.IOException;
 import java.util.HashMap;
 import java.util.HashSet;
@@ -31,9 +32,10 @@ final class RawObject {
             String name = parser.currentName();
             parser.nextToken();
             if (known.contains(name)) {
-                if (members.put(name, value(parser, known.membersOf(name))) != null) {
+                if (members.put(name, value(parser, name, known)) != null) {
+                    String path = known.path(name);
                     throw new Refused(
-                            RejectReason.DUPLICATE_FIELD, name, name + " must be there once, was there twice");
+                            RejectReason.DUPLICATE_FIELD, path, path + " must be there once, was there twice");
                 }
             } else {
                 parser.skipChildren();
@@ -48,18 +50,33 @@ final class RawObject {
         return new RawObject(members);
     }
 
-    private static RawValue value(JsonParser parser, @Nullable KnownFields wanted) throws IOException, Refused {
+    private static RawValue value(JsonParser parser, String name, KnownFields known) throws IOException, Refused {
         return switch (parser.currentToken()) {
-            case VALUE_STRING -> new RawValue(RawValue.Kind.TEXT, parser.getText(), null);
-            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT -> new RawValue(RawValue.Kind.NUMBER, parser.getText(), null);
+            case VALUE_STRING -> new RawValue(RawValue.Kind.TEXT, text(parser, known.path(name)), null);
+            case VALUE_NUMBER_INT, VALUE_NUMBER_FLOAT ->
+                new RawValue(RawValue.Kind.NUMBER, text(parser, known.path(name)), null);
             case VALUE_TRUE, VALUE_FALSE -> RawValue.of(RawValue.Kind.BOOLEAN);
             case START_ARRAY -> skipped(parser, RawValue.Kind.ARRAY);
-            case START_OBJECT ->
-                wanted == null
-                        ? skipped(parser, RawValue.Kind.OBJECT)
-                        : new RawValue(RawValue.Kind.OBJECT, "", read(parser, wanted));
+            case START_OBJECT -> object(parser, known.membersOf(name));
             default -> RawValue.of(RawValue.Kind.NULL);
         };
+    }
+
+    private static String text(JsonParser parser, String path) throws IOException, Refused {
+        try {
+            return parser.getText();
+        } catch (StreamConstraintsException e) {
+            throw new Refused(
+                    RejectReason.TOO_LARGE,
+                    path,
+                    path + " must have at most " + UntrustedJson.MAX_TEXT + " characters, has more");
+        }
+    }
+
+    private static RawValue object(JsonParser parser, @Nullable KnownFields wanted) throws IOException, Refused {
+        return wanted == null
+                ? skipped(parser, RawValue.Kind.OBJECT)
+                : new RawValue(RawValue.Kind.OBJECT, "", read(parser, wanted));
     }
 
     private static RawValue skipped(JsonParser parser, RawValue.Kind kind) throws IOException {

@@ -19,7 +19,7 @@ final class UntrustedJson {
     /** Deepest nesting of objects and arrays. */
     static final int MAX_DEPTH = 32;
 
-    /** Longest text of a known field, in characters; the contracts' own limits are far below. */
+    /** Longest name or text of a known field, in characters; the contracts' own limits are far below. */
     static final int MAX_TEXT = 64 * 1024;
 
     private static final JsonFactory FACTORY = JsonFactory.builder()
@@ -96,7 +96,7 @@ final class UntrustedJson {
             return new Refused(
                     RejectReason.TOO_DEEP, "", "objects and arrays must be nested at most " + MAX_DEPTH + " deep");
         }
-        return new Refused(RejectReason.TOO_LARGE, "", "names and texts must have at most " + MAX_TEXT + " characters");
+        return new Refused(RejectReason.TOO_LARGE, "", "names of fields must have at most " + MAX_TEXT + " characters");
     }
 
     /** Jackson's own message quotes the input, so only the place is told. */

@@ -118,7 +118,7 @@ class CaseReportReaderTest {
                 "{\"lon\":1} | missing-field | position.lat | position.lat must be there, was missing",
                 "{\"lon\":\"1\",\"lat\":1} | wrong-type | position.lon | position.lon must be a number, was \"1\"",
                 "[1,2] | wrong-type | position | position must be an object, was an array",
-                "{\"lon\":1,\"lon\":2,\"lat\":1} | duplicate-field | lon | lon must be there once, was there twice",
+                "{\"lon\":1,\"lon\":2,\"lat\":1} | duplicate-field | position.lon | position.lon must be there once, was there twice",
             })
     void shouldCheckPositions(String position, String reason, String field, String detail) {
         String text = Reports.REPORT.replace("\"region\": \"NM-014\"", "\"position\": " + position);

@@ -69,8 +69,10 @@ class UntrustedJsonTest {
         CaseReportReaderTest.assertUnusable(
                 Reports.report().put("source", large).toString(),
                 "too-large",
-                "",
-                "names and texts must have at most 65536 characters");
+                "source",
+                "source must have at most 65536 characters, has more");
+        CaseReportReaderTest.assertUnusable(
+                "{\"" + large + "\": 1}", "too-large", "", "names of fields must have at most 65536 characters");
         CaseReportReaderTest.assertUnusable(
                 Reports.REPORT.replace("\"count\": 3", "\"count\": " + "9".repeat(60_000)),
                 "out-of-range",

@@ -1,0 +1,44 @@
+package org.seamwatch.ops;
+
+import static org.assertj.core.api.Assertions.assertThat;
+
+import java.io.PrintWriter;
+import java.io.StringWriter;
+import org.junit.jupiter.api.Test;
+import org.seamwatch.schemas.InputException;
+
+class FailuresTest {
+
+    private final StringWriter err = new StringWriter();
+
+    private int fail(boolean verbose, Exception e) {
+        return new Failures(new PrintWriter(err), () -> verbose).failed(e);
+    }
+
+    @Test
+    void shouldSayInOneLineWhatIsWrongWithTheInput() {
+        assertThat(fail(false, new InputException("plan.yaml:3: two\nlines"))).isEqualTo(2);
+        assertThat(err.toString().lines()).containsExactly("seamwatch: plan.yaml:3: two lines");
+    }
+
+    @Test
+    void shouldSayHowToSeeWhereAnUnexpectedFailureCameFrom() {
+        assertThat(fail(false, new IllegalStateException("it broke"))).isEqualTo(1);
+        assertThat(err.toString().lines())
+                .containsExactly("seamwatch: unexpected IllegalStateException: it broke (--verbose shows where)");
+    }
+
+    @Test
+    void shouldShowWhereWhenAsked() {
+        assertThat(fail(true, new IllegalStateException("it broke"))).isEqualTo(1);
+        assertThat(err.toString().lines())
+                .startsWith("seamwatch: unexpected IllegalStateException: it broke")
+                .anyMatch(line -> line.contains("FailuresTest"));
+    }
+
+    @Test
+    void shouldNotTakeAKnownFailureForTheUsersInput() {
+        assertThat(fail(false, new CommandFailure("no broker answers", null))).isEqualTo(1);
+        assertThat(err.toString().lines()).containsExactly("seamwatch: no broker answers");
+    }
+}
