@@ -8,6 +8,7 @@ import java.util.Properties;
 import java.util.concurrent.CountDownLatch;
 import org.apache.kafka.clients.producer.KafkaProducer;
 import org.apache.kafka.clients.producer.ProducerConfig;
+import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.TopicPartition;
 import org.apache.kafka.common.serialization.ByteArraySerializer;
 import org.apache.kafka.streams.CloseOptions;
@@ -31,13 +32,21 @@ public final class StreamsService implements AutoCloseable {
     /** An instance that has not started. */
     public StreamsService(Watch watch) {
         plan = watch.plan();
-        streams = new KafkaStreams(FlowTopology.of(watch), StreamsSettings.of(plan));
+        streams = engine(watch);
         streams.setUncaughtExceptionHandler(failures);
         streams.setStateListener((now, before) -> {
             if (now == KafkaStreams.State.ERROR || now == KafkaStreams.State.NOT_RUNNING) {
                 ended.countDown();
             }
         });
+    }
+
+    private static KafkaStreams engine(Watch watch) {
+        try {
+            return new KafkaStreams(FlowTopology.of(watch), StreamsSettings.of(watch.plan()));
+        } catch (KafkaException e) {
+            throw StreamsSettings.wrong(watch.plan(), e);
+        }
     }
 
     /** Starts the threads and returns; {@link #state} says when they run. */

@@ -2,11 +2,14 @@ package org.seamwatch.topology.service;
 
 import java.nio.file.Path;
 import java.util.Properties;
-import org.apache.kafka.clients.CommonClientConfigs;
+import java.util.Set;
+import org.apache.kafka.clients.admin.AdminClientConfig;
 import org.apache.kafka.clients.consumer.ConsumerConfig;
 import org.apache.kafka.clients.producer.ProducerConfig;
+import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.config.TopicConfig;
 import org.apache.kafka.streams.StreamsConfig;
+import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.topology.LogTime;
 
@@ -21,6 +24,9 @@ final class StreamsSettings {
     private static final int COMMIT_MS = 200;
     private static final int SEGMENT_BYTES = 64 << 20;
     private static final long CACHE_BYTES = 16L << 20;
+
+    private static final Set<String> ENGINE_KEYS = StreamsConfig.configDef().names();
+    private static final Set<String> CLIENT_KEYS = AdminClientConfig.configNames();
 
     private StreamsSettings() {}
 
@@ -57,20 +63,24 @@ final class StreamsSettings {
         return p;
     }
 
-    /** Properties for plain clients: the plan's that are not the engine's own. */
+    /** Properties for plain clients: the plan's but for what only the engine knows. */
     static Properties client(Plan plan) {
         Properties p = new Properties();
         plan.kafka().forEach((key, value) -> {
-            if (!StreamsConfig.configDef().names().contains(key) || isCommon(key)) {
+            if (CLIENT_KEYS.contains(key) || !ENGINE_KEYS.contains(key)) {
                 p.put(key, value);
             }
         });
         return p;
     }
 
-    private static boolean isCommon(String key) {
-        return key.equals(CommonClientConfigs.BOOTSTRAP_SERVERS_CONFIG)
-                || key.equals(CommonClientConfigs.SECURITY_PROTOCOL_CONFIG);
+    /** What is wrong with the plan's properties, as one line. */
+    static InputException wrong(Plan plan, KafkaException e) {
+        Throwable cause = e;
+        while (cause.getCause() instanceof KafkaException deeper) {
+            cause = deeper;
+        }
+        return new InputException(plan.file() + ": kafka: " + cause.getMessage());
     }
 
     private static Path defaultStateDir() {

@@ -12,6 +12,7 @@ import org.apache.kafka.clients.admin.Config;
 import org.apache.kafka.clients.admin.ListTopicsOptions;
 import org.apache.kafka.clients.admin.NewTopic;
 import org.apache.kafka.clients.admin.OffsetSpec;
+import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.TopicPartition;
 import org.apache.kafka.common.config.ConfigResource;
 import org.apache.kafka.common.config.TopicConfig;
@@ -39,11 +40,19 @@ public final class TopicSetup {
      * Makes sure that every topic of the plan is there and as it must be.
      *
      * @return warnings, one line each
-     * @throws InputException where plan and topics do not fit
+     * @throws InputException where plan and topics do not fit, or the plan's properties are no use, or no broker answers
      */
     public static List<String> prepare(Plan plan) {
-        try (Admin admin = Admin.create(StreamsSettings.client(plan))) {
+        try (Admin admin = admin(plan)) {
             return new TopicSetup(admin, plan).prepare();
+        }
+    }
+
+    private static Admin admin(Plan plan) {
+        try {
+            return Admin.create(StreamsSettings.client(plan));
+        } catch (KafkaException e) {
+            throw StreamsSettings.wrong(plan, e);
         }
     }
 
