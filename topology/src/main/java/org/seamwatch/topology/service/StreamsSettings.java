@@ -2,7 +2,7 @@ package org.seamwatch.topology.service;
 
 import java.nio.file.Path;
 import java.util.Properties;
-import org.apache.kafka.clients.CommonClientConfigs;
+import org.apache.kafka.clients.admin.AdminClientConfig;
 import org.apache.kafka.clients.consumer.ConsumerConfig;
 import org.apache.kafka.clients.producer.ProducerConfig;
 import org.apache.kafka.common.config.TopicConfig;
@@ -57,20 +57,16 @@ final class StreamsSettings {
         return p;
     }
 
-    /** Properties for plain clients: the plan's that are not the engine's own. */
+    /** Properties for plain clients: the plan's that are not the engine's alone. */
     static Properties client(Plan plan) {
         Properties p = new Properties();
         plan.kafka().forEach((key, value) -> {
-            if (!StreamsConfig.configDef().names().contains(key) || isCommon(key)) {
+            if (!StreamsConfig.configDef().names().contains(key)
+                    || AdminClientConfig.configNames().contains(key)) {
                 p.put(key, value);
             }
         });
         return p;
-    }
-
-    private static boolean isCommon(String key) {
-        return key.equals(CommonClientConfigs.BOOTSTRAP_SERVERS_CONFIG)
-                || key.equals(CommonClientConfigs.SECURITY_PROTOCOL_CONFIG);
     }
 
     private static Path defaultStateDir() {
