@@ -3,6 +3,8 @@ package org.seamwatch.ops;
 import java.io.PrintWriter;
 import java.util.Locale;
 import java.util.function.BooleanSupplier;
+import org.apache.kafka.common.KafkaException;
+import org.apache.kafka.common.config.ConfigException;
 import org.jspecify.annotations.Nullable;
 import org.seamwatch.schemas.InputException;
 import org.seamwatch.topology.replay.ResultFileException;
@@ -49,10 +51,25 @@ final class Failures {
             trace(e);
             return FAILED;
         }
+        if (e instanceof KafkaException) {
+            Throwable root = root(e);
+            line("kafka: " + oneLine(root.getMessage()));
+            trace(e);
+            return root instanceof ConfigException ? WRONG_INPUT : FAILED;
+        }
         line("unexpected " + e.getClass().getSimpleName() + ": " + oneLine(e.getMessage())
                 + (verbose.getAsBoolean() ? "" : " (--verbose shows where)"));
         trace(e);
         return FAILED;
+    }
+
+    /** Clients wrap what is wrong in sentences that do not say it. */
+    private static Throwable root(Throwable e) {
+        Throwable root = e;
+        while (root.getCause() != null) {
+            root = root.getCause();
+        }
+        return root;
     }
 
     private void trace(Throwable e) {

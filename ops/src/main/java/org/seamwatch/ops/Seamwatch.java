@@ -29,7 +29,13 @@ import picocli.CommandLine.Spec;
         mixinStandardHelpOptions = true,
         versionProvider = Seamwatch.Version.class,
         scope = CommandLine.ScopeType.INHERIT,
-        subcommands = {CheckCommand.class, ReplayCommand.class, SendCommand.class, ScenarioCommand.class})
+        subcommands = {
+            RunCommand.class,
+            CheckCommand.class,
+            ReplayCommand.class,
+            SendCommand.class,
+            ScenarioCommand.class
+        })
 public final class Seamwatch implements Callable<Integer> {
 
     @Spec

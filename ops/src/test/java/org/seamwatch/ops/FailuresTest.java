@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.io.PrintWriter;
 import java.io.StringWriter;
+import org.apache.kafka.common.KafkaException;
+import org.apache.kafka.common.config.ConfigException;
 import org.junit.jupiter.api.Test;
 import org.seamwatch.schemas.InputException;
 
@@ -34,6 +36,16 @@ class FailuresTest {
         assertThat(err.toString().lines())
                 .startsWith("seamwatch: unexpected IllegalStateException: it broke")
                 .anyMatch(line -> line.contains("FailuresTest"));
+    }
+
+    @Test
+    void shouldSayWhatKafkasClientsWrapUp() {
+        Exception wrapped =
+                new KafkaException("Failed to create new KafkaAdminClient", new ConfigException("bad value"));
+        assertThat(fail(false, wrapped)).isEqualTo(2);
+        assertThat(fail(false, new KafkaException("Failed", new IllegalStateException("it broke"))))
+                .isEqualTo(1);
+        assertThat(err.toString().lines()).containsExactly("seamwatch: kafka: bad value", "seamwatch: kafka: it broke");
     }
 
     @Test

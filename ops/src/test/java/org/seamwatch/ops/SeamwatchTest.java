@@ -22,11 +22,11 @@ class SeamwatchTest {
         Run run = Run.of("--help");
         assertThat(run.code()).isZero();
         assertThat(run.out())
-                .contains("check ", "replay ", "send ", "scenario ", "0     done", "2     the input is wrong");
+                .contains("run ", "check ", "replay ", "send ", "scenario ", "0     done", "2     the input is wrong");
     }
 
     @ParameterizedTest
-    @ValueSource(strings = {"check", "replay", "send", "scenario"})
+    @ValueSource(strings = {"run", "check", "replay", "send", "scenario"})
     void shouldHelpWithEachCommand(String command) {
         Run run = Run.of(command, "--help");
         assertThat(run.code()).isZero();
