@@ -40,9 +40,11 @@ class LayersTest {
     @ArchTest
     static final ArchRule shouldHaveNoThreadsOfItsOwn = noClasses()
             .should()
-            .dependOnClassesThat(named("start or join threads", type -> type.isAssignableTo(Thread.class)
-                    || (type.getPackageName().startsWith("java.util.concurrent")
-                            && !type.getName().equals("java.util.concurrent.TimeUnit"))));
+            .dependOnClassesThat(named(
+                    "start or join threads",
+                    type -> type.isAssignableTo(Thread.class)
+                            || (type.getPackageName().startsWith("java.util.concurrent")
+                                    && !type.getName().equals("java.util.concurrent.TimeUnit"))));
 
     @ArchTest
     static final ArchRule shouldNeverAskForTheTime = noClasses()
@@ -61,9 +63,10 @@ class LayersTest {
     @ArchTest
     static final ArchRule shouldDrawNothingWithoutASeed = noClasses()
             .should()
-            .dependOnClassesThat(named("are the platform's generators", type -> Set.of(
-                            "java.util.Random", "java.util.SplittableRandom", "java.security.SecureRandom")
-                    .contains(type.getName())))
+            .dependOnClassesThat(named(
+                    "are the platform's generators",
+                    type -> Set.of("java.util.Random", "java.util.SplittableRandom", "java.security.SecureRandom")
+                            .contains(type.getName())))
             .orShould()
             .callMethod(Math.class, "random")
             .orShould()
@@ -90,7 +93,8 @@ class LayersTest {
             .callMethodWhere(new DescribedPredicate<JavaMethodCall>("it makes a stream parallel") {
                 @Override
                 public boolean test(JavaMethodCall call) {
-                    return Set.of("parallel", "parallelStream").contains(call.getTarget().getName());
+                    return Set.of("parallel", "parallelStream")
+                            .contains(call.getTarget().getName());
                 }
             });
 

@@ -18,9 +18,7 @@ class BoardTest {
     private static final LocalDate FIRST = LocalDate.of(2024, 2, 1);
 
     private final Board board = new Board(
-            Learner.of(1),
-            List.of(new EwmaChart(0.2, Sides.UPPER, 0.9), IndividualsChart.of(Sides.UPPER, 1.5)),
-            8);
+            Learner.of(1), List.of(new EwmaChart(0.2, Sides.UPPER, 0.9), IndividualsChart.of(Sides.UPPER, 1.5)), 8);
 
     private static double value(int n) {
         return Math.floorMod(n * 7, 5) + 0.1 * Math.floorMod(n * 3, 7);
@@ -86,7 +84,8 @@ class BoardTest {
         LocalDate day = FIRST.plusDays(10);
         Judgement judgement = board.judge(state, day, 3);
 
-        assertThat(board.settle(judgement, day, 3, Lesson.TEACH).learning().days()).isEqualTo(11);
+        assertThat(board.settle(judgement, day, 3, Lesson.TEACH).learning().days())
+                .isEqualTo(11);
         BoardState waits = board.settle(judgement, day, 3, Lesson.WAIT);
         assertThat(waits.learning().days()).isEqualTo(10);
         assertThat(waits.learning().waiting()).hasSize(1);
@@ -94,6 +93,7 @@ class BoardTest {
         assertThat(released.learning().days()).isEqualTo(11);
         assertThat(released.learning().waiting()).isEmpty();
         assertThat(board.settle(waits, Lesson.WAIT)).isEqualTo(waits);
-        assertThat(board.settle(waits, Lesson.WAIT_AND_RELEASE).learning().days()).isEqualTo(11);
+        assertThat(board.settle(waits, Lesson.WAIT_AND_RELEASE).learning().days())
+                .isEqualTo(11);
     }
 }

@@ -119,7 +119,8 @@ class MoranStatisticTest {
         cases[7] = 4;
 
         assertThat(read(desk, cases, filled(0), 56).status()).isEqualTo(StatisticStatus.USABLE);
-        assertThat(read(desk.holidays(new HolidayPlan(DAY, "R00*")), cases, filled(0), 56).status())
+        assertThat(read(desk.holidays(new HolidayPlan(DAY, "R00*")), cases, filled(0), 56)
+                        .status())
                 .isEqualTo(StatisticStatus.THIN);
     }
 
@@ -170,8 +171,7 @@ class MoranStatisticTest {
     }
 
     private static SeriesDay blank(LocalDate day) {
-        return new SeriesDay(
-                1, "gridland/influenza", day, 0, java.time.Instant.EPOCH, 9, 25, 0, List.of(), null);
+        return new SeriesDay(1, "gridland/influenza", day, 0, java.time.Instant.EPOCH, 9, 25, 0, List.of(), null);
     }
 
     @Test
@@ -183,7 +183,8 @@ class MoranStatisticTest {
     @Test
     void shouldSayWhatItIsInWords() {
         assertThat(statistic(spec(TestDesk.small())).words())
-                .isEqualTo("Moran's I of count over 1 day, edge contiguity, binary weights, against the series' own past");
+                .isEqualTo(
+                        "Moran's I of count over 1 day, edge contiguity, binary weights, against the series' own past");
     }
 
     @Test
