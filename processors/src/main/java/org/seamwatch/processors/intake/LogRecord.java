@@ -16,7 +16,14 @@ import org.jspecify.annotations.Nullable;
 public record LogRecord(
         String topic, int partition, long offset, long timestamp, byte @Nullable [] key, byte @Nullable [] value) {
 
-    public LogRecord {
-        timestamp = Math.max(0, timestamp);
+    // Written out, since a compact constructor loses the annotations of its parameters.
+    public LogRecord(
+            String topic, int partition, long offset, long timestamp, byte @Nullable [] key, byte @Nullable [] value) {
+        this.topic = topic;
+        this.partition = partition;
+        this.offset = offset;
+        this.timestamp = Math.max(0, timestamp);
+        this.key = key;
+        this.value = value;
     }
 }

@@ -98,8 +98,7 @@ class AlarmBookTest {
     void shouldRaiseAndEndInOneCloseWhenDaysAreCaughtUp() {
         close(1, 20, ended(3, 4, 11));
 
-        assertThat(said)
-                .containsExactly(RAISED + " 2024-02-03 1 2024-02-04", ENDED + " 2024-02-03 2 2024-02-11");
+        assertThat(said).containsExactly(RAISED + " 2024-02-03 1 2024-02-04", ENDED + " 2024-02-03 2 2024-02-11");
     }
 
     @Test

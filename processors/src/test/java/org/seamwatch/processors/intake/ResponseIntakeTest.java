@@ -82,7 +82,7 @@ class ResponseIntakeTest implements IntakeOutput {
     @ParameterizedTest
     @CsvSource({
         "gridland/mumps, gridland/influenza/2024-02-03, key-mismatch",
-        "gridland, gridland/influenza/2024-02-03, key-mismatch",
+        "gridland, gridland/influenza/2024-02-03, no-series-takes-it",
         "gridland/mumps, gridland/mumps/2024-02-03, no-series-takes-it",
     })
     void shouldRefuseAResponseThatBelongsToNoSeries(String key, String alarm, String reason) {

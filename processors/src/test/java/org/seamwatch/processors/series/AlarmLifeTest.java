@@ -86,7 +86,8 @@ class AlarmLifeTest {
         assertThat(raised.alarm()).isEqualTo(SERIES + "/" + raised.day());
         assertThat(raised.day()).isBetween(FIRST.plusDays(60), FIRST.plusDays(65));
         assertThat(raised.statistics()).containsExactly("moran");
-        assertThat(moran(bench.lastDay(raised.day().toString())).charts().get(0).grade()).isEqualTo(Grade.ACTION);
+        assertThat(moran(bench.lastDay(raised.day().toString())).charts().get(0).grade())
+                .isEqualTo(Grade.ACTION);
         AlarmState state = bench.alarms(SERIES).get(0);
         assertThat(bench.alarms.get(1).day()).isEqualTo(state.end());
         assertThat(state.lastSignal().plusDays(7)).isEqualTo(state.end());
@@ -151,7 +152,10 @@ class AlarmLifeTest {
         assertThat(bench.alarms).extracting(AlarmChange::change).containsExactly(Change.RAISED, Change.RESPONDED);
         AlarmChange responded = bench.alarms.get(1);
         assertThat(responded.sequence()).isEqualTo(2);
-        assertThat(responded.response()).isNotNull().extracting(r -> r.verdict().toString()).isEqualTo("OUTBREAK");
+        assertThat(responded.response())
+                .isNotNull()
+                .extracting(r -> r.verdict().toString())
+                .isEqualTo("OUTBREAK");
         assertThat(responded.evidence()).isEqualTo(bench.alarms.get(0).evidence());
         assertThat(bench.lines).last().asString().startsWith("alarms 2024-03-05T11:00:00Z ");
         byte[] row = bench.books.get(SERIES + "|book");
@@ -175,7 +179,11 @@ class AlarmLifeTest {
         for (int i = 0; i < 12; i++) {
             AlarmChange change = bench.alarms.get(i + 1);
             assertThat(change.response()).isNotNull();
-            assertThat(change.response().verdict().name().toLowerCase(java.util.Locale.ROOT).replace('_', '-'))
+            assertThat(change.response()
+                            .verdict()
+                            .name()
+                            .toLowerCase(java.util.Locale.ROOT)
+                            .replace('_', '-'))
                     .isEqualTo(verdicts.get(i % 3));
             assertThat(change.sequence()).isEqualTo(i + 2);
         }
@@ -196,9 +204,7 @@ class AlarmLifeTest {
         Watch after = DESK.limits(5, 28, 3).watch();
         bench.restart(after);
         days(64, 70, false);
-        log.say(
-                "2024-03-11T12:00:00Z",
-                Say.of("late", "R0000", "2024-03-01").count(2));
+        log.say("2024-03-11T12:00:00Z", Say.of("late", "R0000", "2024-03-01").count(2));
         log.clock("2024-03-12T00:00:00Z");
         var streams = log.messages(after);
         for (int i = 0; i < streams.size(); i++) {

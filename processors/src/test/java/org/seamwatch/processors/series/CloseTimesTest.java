@@ -35,11 +35,8 @@ class CloseTimesTest {
         "America/New_York,  1, 2024-02-03, 2024-02-05T05:00:00Z",
     })
     void shouldCloseADayAtTheStartOfADayOfItsZone(String zone, int closeAfter, String day, Instant expected) {
-        Watch watch = TestDesk.small()
-                .zone(zone)
-                .from(day)
-                .days(closeAfter, 28, 1)
-                .watch();
+        Watch watch =
+                TestDesk.small().zone(zone).from(day).days(closeAfter, 28, 1).watch();
         Instant start = LocalDate.parse(day).atStartOfDay(ZoneOffset.UTC).toInstant();
         TestLog hourly = new TestLog(1);
         for (int hour = -24; hour < 150; hour++) {
@@ -63,7 +60,11 @@ class CloseTimesTest {
 
         StageBench bench = new StageBench(watch).takeAll(log.messages(watch));
         assertThat(bench.seriesDays.get(0).day()).isEqualTo("2024-01-25");
-        assertThat(bench.seriesDays).hasSize(9).last().extracting(SeriesDay::day).hasToString("2024-02-02");
+        assertThat(bench.seriesDays)
+                .hasSize(9)
+                .last()
+                .extracting(SeriesDay::day)
+                .hasToString("2024-02-02");
     }
 
     @Test
@@ -73,7 +74,11 @@ class CloseTimesTest {
         log.respond("2024-02-01T12:00:00Z", "x", "{}");
         log.clock("2024-02-04T01:00:00Z");
 
-        assertThat(new StageBench(watch).takeAll(log.messages(watch)).seriesDays.get(0).day())
+        assertThat(new StageBench(watch)
+                        .takeAll(log.messages(watch))
+                        .seriesDays
+                        .get(0)
+                        .day())
                 .isEqualTo("2024-01-22");
     }
 }

@@ -130,7 +130,11 @@ final class RandomFeed {
     }
 
     private static int revision(Say say) {
-        return (int) say.fields().getOrDefault("revision", 0);
+        return (int) number(say, "revision");
+    }
+
+    private static long number(Say say, String field) {
+        return say.fields().get(field) instanceof Integer number ? number : 0;
     }
 
     /** Final counts by series, region and day; none that is zero. */
@@ -141,7 +145,7 @@ final class RandomFeed {
                 counts.merge(
                         "gridland/influenza|" + say.fields().get("region") + "|"
                                 + say.fields().get("eventDate"),
-                        (long) (int) say.fields().get("count"),
+                        number(say, "count"),
                         Long::sum);
             }
         }

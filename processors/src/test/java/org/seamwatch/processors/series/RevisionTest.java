@@ -24,9 +24,7 @@ class RevisionTest {
     private void say(String time, String region, LocalDate day, int count) {
         log.say(
                 time,
-                Say.of("r-" + reports++, region, day.toString())
-                        .count(count)
-                        .at(Instant.parse(time)));
+                Say.of("r-" + reports++, region, day.toString()).count(count).at(Instant.parse(time)));
     }
 
     /** Cases of a day, uneven and different from day to day, reported at its noon. */
@@ -61,7 +59,9 @@ class RevisionTest {
 
         assertThat(bench.regionDays)
                 .containsExactly(
-                        regionDay("R0000", FIRST, 4, 0), regionDay("R0101", FIRST, 2, 0), regionDay("R0101", FIRST, 5, 1));
+                        regionDay("R0000", FIRST, 4, 0),
+                        regionDay("R0101", FIRST, 2, 0),
+                        regionDay("R0101", FIRST, 5, 1));
         assertThat(bench.revisions("2024-02-01"))
                 .extracting(d -> d.revision() + " " + d.closedAt() + " " + d.cases())
                 .containsExactly("0 2024-02-03T00:00:00Z 6", "1 2024-02-05T00:00:00Z 9");
@@ -83,8 +83,7 @@ class RevisionTest {
         log.clock("2024-02-06T00:00:00Z");
         StageBench bench = run(TestDesk.small().from("2024-02-01"));
 
-        assertThat(bench.regionDays)
-                .containsExactly(regionDay("R0202", FIRST, 3, 0), regionDay("R0202", FIRST, 0, 1));
+        assertThat(bench.regionDays).containsExactly(regionDay("R0202", FIRST, 3, 0), regionDay("R0202", FIRST, 0, 1));
         assertThat(bench.revisions("2024-02-01")).hasSize(2);
     }
 
@@ -178,10 +177,7 @@ class RevisionTest {
     /** 11 February is counted anew too late to be judged again; the days that read it and are judged again later see it. */
     @Test
     void shouldJudgeADayAgainOnTheCountsAsTheyNowStand() {
-        TestDesk desk = TestDesk.small()
-                .days(1, 3, 1)
-                .from("2024-02-01")
-                .measure("share-residual", 0);
+        TestDesk desk = TestDesk.small().days(1, 3, 1).from("2024-02-01").measure("share-residual", 0);
         for (int day = 0; day < 40; day++) {
             ordinary(day);
         }
@@ -219,9 +215,10 @@ class RevisionTest {
         log.clock("2024-02-06T00:00:00Z").clock("2024-02-07T00:00:00Z");
         StageBench bench = run(TestDesk.small().from("2024-02-03"));
 
-        assertThat(bench.seriesDays).extracting(d -> d.day().toString()).containsExactly("2024-02-03", "2024-02-04", "2024-02-05");
-        assertThat(bench.regionDays)
-                .containsExactly(regionDay("R0101", FIRST, 3, 0), regionDay("R0101", FIRST, 4, 1));
+        assertThat(bench.seriesDays)
+                .extracting(d -> d.day().toString())
+                .containsExactly("2024-02-03", "2024-02-04", "2024-02-05");
+        assertThat(bench.regionDays).containsExactly(regionDay("R0101", FIRST, 3, 0), regionDay("R0101", FIRST, 4, 1));
     }
 
     @Test

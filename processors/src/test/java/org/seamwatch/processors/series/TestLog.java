@@ -4,7 +4,6 @@ import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
-import org.jspecify.annotations.Nullable;
 import org.seamwatch.processors.flow.InputSizes;
 import org.seamwatch.processors.flow.SeriesMessage;
 import org.seamwatch.processors.flow.Topics;
@@ -65,8 +64,7 @@ final class TestLog {
         return this;
     }
 
-    private static void add(
-            List<LogRecord> log, String topic, int partition, Instant time, byte[] key, byte @Nullable [] value) {
+    private static void add(List<LogRecord> log, String topic, int partition, Instant time, byte[] key, byte[] value) {
         log.add(new LogRecord(topic, partition, log.size(), time.toEpochMilli(), key, value));
     }
 
