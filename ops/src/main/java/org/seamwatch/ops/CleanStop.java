@@ -2,6 +2,7 @@ package org.seamwatch.ops;
 
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.TimeUnit;
+import java.util.function.IntSupplier;
 
 /**
  * Lets Ctrl-C, or a stop by the system, end a command that runs until it is stopped as a success: what runs is closed,
@@ -14,11 +15,13 @@ final class CleanStop {
     private final CountDownLatch finished = new CountDownLatch(1);
     private final Console console;
     private final Runnable stop;
+    private final IntSupplier code;
     private final Thread hook;
 
-    private CleanStop(Console console, Runnable stop) {
+    private CleanStop(Console console, Runnable stop, IntSupplier code) {
         this.console = console;
         this.stop = stop;
+        this.code = code;
         this.hook = new Thread(this::end, "clean-stop");
     }
 
@@ -28,7 +31,12 @@ final class CleanStop {
      * @param stop makes the command finish
      */
     static CleanStop with(Console console, Runnable stop) {
-        CleanStop clean = new CleanStop(console, stop);
+        return with(console, stop, () -> Failures.DONE);
+    }
+
+    /** The same with another exit code, asked for once the command has finished. */
+    static CleanStop with(Console console, Runnable stop, IntSupplier code) {
+        CleanStop clean = new CleanStop(console, stop, code);
         Runtime.getRuntime().addShutdownHook(clean.hook);
         return clean;
     }
@@ -42,7 +50,7 @@ final class CleanStop {
             Thread.currentThread().interrupt();
         }
         console.flush();
-        Runtime.getRuntime().halt(done ? Failures.DONE : Failures.FAILED);
+        Runtime.getRuntime().halt(done ? code.getAsInt() : Failures.FAILED);
     }
 
     /** The command has finished, by a signal or by itself. */

@@ -7,6 +7,7 @@ import java.nio.file.Path;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
 import java.util.concurrent.Callable;
+import org.apache.kafka.common.errors.InterruptException;
 import org.jspecify.annotations.Nullable;
 import org.seamwatch.fixtures.scenario.Scenario;
 import org.seamwatch.fixtures.scenario.ScenarioOptions;
@@ -74,7 +75,8 @@ final class DemoCommand implements Callable<Integer> {
                     stop.allPlayed();
                     run.stayUp();
                 }
-            } catch (InterruptedException e) {
+            } catch (InterruptedException | InterruptException e) {
+                boolean unused = Thread.interrupted();
                 console.say("The demo ends.");
                 return stop.code();
             }

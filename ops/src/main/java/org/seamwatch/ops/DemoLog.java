@@ -43,14 +43,14 @@ final class DemoLog {
         return hours.get(hours.size() - 1);
     }
 
+    /** The first full hour that has not been taken yet. */
+    Instant next() {
+        return hours.get(nextHour);
+    }
+
     /** How many records it has in all. */
     long size() {
         return feed.size() + 2L * topics.partitions() * hours.size();
-    }
-
-    /** How many of them are reports. */
-    int reports() {
-        return feed.size();
     }
 
     /** The records that come before an instant and have not been taken yet. */

@@ -12,6 +12,7 @@ import java.util.Map;
 import java.util.stream.Stream;
 import org.apache.kafka.clients.consumer.ConsumerRecord;
 import org.apache.kafka.clients.consumer.KafkaConsumer;
+import org.apache.kafka.common.TopicPartition;
 import org.apache.kafka.common.serialization.ByteArrayDeserializer;
 import org.seamwatch.fixtures.broker.BrokerSettings;
 import org.seamwatch.fixtures.broker.Brokers;
@@ -120,8 +121,9 @@ final class DemoRun implements AutoCloseable {
         for (long read = drain.read(); !drain.isEmpty(); read = drain.read()) {
             progress.now(read, read);
             if (service.failures() > 0 || System.nanoTime() - deadline > 0) {
-                throw new CommandFailure("the service did not read the whole feed, " + service.failures()
-                        + " of its threads have ended", null);
+                throw new CommandFailure(
+                        "the service did not read the whole feed, " + service.failures() + " of its threads have ended",
+                        null);
             }
             Thread.sleep(LOOK.toMillis());
         }
@@ -130,7 +132,7 @@ final class DemoRun implements AutoCloseable {
     /** Plays the rest, a day every two seconds, and prints alarms as they come. */
     void play() throws InterruptedException {
         try (KafkaConsumer<byte[], byte[]> alarms = alarms()) {
-            Instant next = log.nextDay();
+            Instant next = log.next();
             console.say("");
             console.say("From here on a day takes two seconds.");
             for (; !next.isAfter(log.end()); next = next.plus(DAY)) {
@@ -156,7 +158,7 @@ final class DemoRun implements AutoCloseable {
                 new ByteArrayDeserializer(),
                 new ByteArrayDeserializer());
         consumer.assign(consumer.partitionsFor(plan.topics().prefix() + Topics.ALARMS).stream()
-                .map(p -> new org.apache.kafka.common.TopicPartition(p.topic(), p.partition()))
+                .map(p -> new TopicPartition(p.topic(), p.partition()))
                 .toList());
         consumer.seekToBeginning(consumer.assignment());
         return consumer;

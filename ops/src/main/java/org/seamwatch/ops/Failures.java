@@ -18,6 +18,7 @@ final class Failures {
     static final int DONE = 0;
     static final int FAILED = 1;
     static final int WRONG_INPUT = 2;
+    static final int INTERRUPTED = 130;
 
     private final PrintWriter err;
     private final BooleanSupplier verbose;

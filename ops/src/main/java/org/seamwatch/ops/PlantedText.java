@@ -61,11 +61,12 @@ final class PlantedText {
         for (Outbreak outbreak : outbreaks) {
             outbreak(outbreak, used);
         }
-        List<String> others =
-                alarms.keySet().stream().filter(id -> !used.contains(id)).toList();
+        List<List<AlarmChange>> others = alarms.values().stream()
+                .filter(changes -> !used.contains(changes.get(0).alarm()))
+                .toList();
         lines.add("");
         lines.add(others.isEmpty() ? "It alarmed on nothing else." : "What else it alarmed on");
-        others.forEach(id -> lines.add("  " + told(alarms.get(id))));
+        others.forEach(changes -> lines.add("  " + told(changes)));
     }
 
     private void outbreak(Outbreak outbreak, Set<String> used) {
@@ -76,7 +77,8 @@ final class PlantedText {
                 .toList();
         int more = outbreak.regions().size() - places.size();
         lines.add("  " + outbreak.id() + "  " + outbreak.condition() + ", " + String.join(", ", places)
-                + (more > 0 ? " and " + more + " more" : "") + ", " + outbreak.start().format(DAY) + " to "
+                + (more > 0 ? " and " + more + " more" : "") + ", "
+                + outbreak.start().format(DAY) + " to "
                 + outbreak.end().format(DAY) + ", " + outbreak.cases() + " cases (" + outbreak.shape() + ")");
         lines.add("      expected: " + outbreak.expectation());
         List<List<AlarmChange>> near = alarms.values().stream()
@@ -91,7 +93,8 @@ final class PlantedText {
         }
         for (List<AlarmChange> changes : near) {
             long day = ChronoUnit.DAYS.between(outbreak.start(), changes.get(0).day()) + 1;
-            lines.add("      " + (found.isPresent() && found.get() == changes ? "FOUND on its day " + day + ": " : "also: ")
+            lines.add("      "
+                    + (found.isPresent() && found.get() == changes ? "FOUND on its day " + day + ": " : "also: ")
                     + told(changes));
         }
     }

@@ -57,9 +57,14 @@ final class Progress implements AutoCloseable {
      */
     void at(long count, long done) {
         units = count;
-        if (asked++ % ASK_CLOCK_EVERY != 0) {
-            return;
+        if (asked++ % ASK_CLOCK_EVERY == 0) {
+            now(count, done);
         }
+    }
+
+    /** The same for work that tells seldom. */
+    void now(long count, long done) {
+        units = count;
         long now = nanos.getAsLong();
         if (now - next >= 0) {
             draw(now, done);

@@ -30,6 +30,7 @@ import picocli.CommandLine.Spec;
         versionProvider = Seamwatch.Version.class,
         scope = CommandLine.ScopeType.INHERIT,
         subcommands = {
+            DemoCommand.class,
             RunCommand.class,
             CheckCommand.class,
             ReplayCommand.class,
