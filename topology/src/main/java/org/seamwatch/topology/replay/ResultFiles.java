@@ -129,7 +129,13 @@ public final class ResultFiles implements ReplayOutput {
         files.put(ALARMS, alarms);
         files.put(REJECTED, rejected);
         files.put(ACCOUNTING, accounts.stream().sorted(Accounting.ORDER).toList());
-        files.forEach((name, records) -> write(folder.resolve(name + UNFINISHED), records, name.equals(ACCOUNTING)));
+        try {
+            files.forEach(
+                    (name, records) -> write(folder.resolve(name + UNFINISHED), records, name.equals(ACCOUNTING)));
+        } catch (ResultFileException e) {
+            files.keySet().forEach(name -> discard(folder.resolve(name + UNFINISHED)));
+            throw e;
+        }
         files.keySet().forEach(name -> finish(folder, name));
     }
 
@@ -150,6 +156,17 @@ public final class ResultFiles implements ReplayOutput {
 
     private static String array(List<?> records) {
         return records.stream().map(Json::line).collect(Collectors.joining(",\n", "[\n", "\n]\n"));
+    }
+
+    /** Gives back the room that half a file takes; the failure that led here is what counts. */
+    private static void discard(Path file) {
+        try {
+            if (Files.isRegularFile(file)) {
+                Files.delete(file);
+            }
+        } catch (IOException e) {
+            file.toFile().deleteOnExit();
+        }
     }
 
     private static void finish(Path folder, String name) {

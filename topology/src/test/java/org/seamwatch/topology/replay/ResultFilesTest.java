@@ -92,6 +92,8 @@ class ResultFilesTest {
                 .isInstanceOf(ResultFileException.class)
                 .hasMessageStartingWith(inTheWay + ": cannot be written");
         assertThat(Files.readAllBytes(folder.resolve(ResultFiles.REGION_DAYS))).isEqualTo(before);
+        Files.delete(inTheWay);
+        assertThat(names()).hasSize(5).noneMatch(name -> name.endsWith(".part"));
     }
 
     @Test
