@@ -13,6 +13,7 @@ import org.seamwatch.processors.statistics.Board;
 import org.seamwatch.processors.statistics.DayInput;
 import org.seamwatch.processors.statistics.MoranStatistic;
 import org.seamwatch.processors.statistics.Statistic;
+import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.geography.Geography;
 import org.seamwatch.schemas.plan.ChartPlan;
 import org.seamwatch.schemas.plan.ContiguityRule;
