@@ -9,7 +9,6 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.stream.Stream;
 import org.apache.kafka.clients.consumer.ConsumerRecord;
 import org.apache.kafka.clients.consumer.KafkaConsumer;
 import org.apache.kafka.common.TopicPartition;
@@ -26,7 +25,6 @@ import org.seamwatch.schemas.json.Json;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.schemas.record.AccountingLine;
 import org.seamwatch.schemas.record.AlarmChange;
-import org.seamwatch.topology.Names;
 import org.seamwatch.topology.service.StreamsService;
 import org.seamwatch.topology.service.TopicSetup;
 
@@ -62,12 +60,8 @@ final class DemoRun implements AutoCloseable {
                 topics,
                 broker.bootstrapServers(),
                 service.applicationId(),
-                Stream.of(Topics.CASE_REPORTS, Topics.ALARM_RESPONSES)
-                        .map(t -> plan.topics().prefix() + t)
-                        .toList(),
-                Stream.of(Names.REPORT_CHANGES, Names.RESPONSE_CHANGES)
-                        .map(c -> service.applicationId() + "-" + Names.repartitionTopic(c))
-                        .toList());
+                service.inputTopics(),
+                service.topicsBetween());
     }
 
     /** Starts broker and service. */

@@ -20,7 +20,7 @@ import org.seamwatch.schemas.record.AccountingLine;
 import org.seamwatch.schemas.record.RegionDay;
 import org.seamwatch.schemas.record.RejectedLine;
 import org.seamwatch.schemas.record.SeriesDay;
-import org.seamwatch.topology.replay.Accounting;
+import org.seamwatch.topology.Accounting;
 
 /** Replays a small made-up scenario, the same for all tests. */
 class ReplayCommandTest {

@@ -42,12 +42,12 @@ public final class FlowTopology {
         StreamsBuilder builder = new StreamsBuilder();
         KStream<byte[], byte[]> reports = changes(
                 source(builder, Topics.CASE_REPORTS, Names.REPORTS),
-                new ReportProcessor.Supplier(watch, sizes),
+                IntakeProcessor.ofReports(watch, sizes),
                 Names.REPORT_INTAKE,
                 Names.REPORT_CHANGES);
         KStream<byte[], byte[]> responses = changes(
                 source(builder, Topics.ALARM_RESPONSES, Names.RESPONSES),
-                new ResponseProcessor.Supplier(watch, sizes),
+                IntakeProcessor.ofResponses(watch, sizes),
                 Names.RESPONSE_INTAKE,
                 Names.RESPONSE_CHANGES);
         reports.merge(responses, Named.as(Names.SERIES_INPUT))

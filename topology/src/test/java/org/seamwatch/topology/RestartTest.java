@@ -121,7 +121,7 @@ class RestartTest {
 
     @Test
     void shouldTakeUpIntakeWhereItWasLeft() {
-        ReportProcessor.Supplier supplier = new ReportProcessor.Supplier(watch, new InputSizes(1, 1));
+        IntakeProcessor.Supplier supplier = IntakeProcessor.ofReports(watch, new InputSizes(1, 1));
         Task whole = new Task(supplier.stores());
         whole.run(supplier.get(), records());
         Task parted = new Task(supplier.stores());
@@ -131,9 +131,9 @@ class RestartTest {
 
     @Test
     void shouldTakeUpTheSeriesWhereTheyWereLeft() {
-        ReportProcessor.Supplier intake = new ReportProcessor.Supplier(watch, new InputSizes(1, 1));
+        IntakeProcessor.Supplier intake = IntakeProcessor.ofReports(watch, new InputSizes(1, 1));
         List<Record<byte[], byte[]>> messages = new Task(intake.stores()).run(intake.get(), records());
-        ResponseProcessor.Supplier responses = new ResponseProcessor.Supplier(watch, new InputSizes(1, 1));
+        IntakeProcessor.Supplier responses = IntakeProcessor.ofResponses(watch, new InputSizes(1, 1));
         List<Record<byte[], byte[]>> marks = new Task(responses.stores()).run(responses.get(), clocks());
         List<Record<byte[], byte[]>> both = new ArrayList<>(messages);
         both.addAll(marks);

@@ -5,6 +5,7 @@ import org.seamwatch.processors.flow.Hours;
 import org.seamwatch.processors.flow.InputSizes;
 import org.seamwatch.processors.flow.SeriesMessage.Watermark;
 import org.seamwatch.processors.state.Shelf;
+import org.seamwatch.schemas.record.ClockRecord;
 
 /**
  * What every input partition does, whatever it carries: its time is the greatest timestamp it has seen, it promises the
@@ -39,8 +40,29 @@ final class InputPartition {
         return topic + "|" + partition;
     }
 
+    /** Makes something of a record, or says why it cannot. */
+    @FunctionalInterface
+    interface Taker {
+        @Nullable
+        Refusal take(LogRecord record);
+    }
+
+    /** Counts a record, and has it taken unless it is a clock record. */
+    void accept(LogRecord record, HourEnd end, Taker taker) {
+        enter(record, end);
+        if (ClockRecord.is(record.key(), record.value())) {
+            account.control();
+        } else {
+            Refusal why = taker.take(record);
+            if (why != null) {
+                reject(record, why);
+            }
+        }
+        accounts.put(key(topic, partition), account.row());
+    }
+
     /** Moves time on to a record; where that enters a new hour, ends the hour before and sends the watermark. */
-    void enter(LogRecord record, HourEnd end) {
+    private void enter(LogRecord record, HourEnd end) {
         long before = account.time();
         account.read(record.timestamp());
         long hour = hour();
@@ -83,12 +105,8 @@ final class InputPartition {
         return account;
     }
 
-    void reject(LogRecord record, Refusal why) {
+    private void reject(LogRecord record, Refusal why) {
         account.reject(why.reason().code());
         out.reject(Rejection.of(record, Hours.endMillis(hour()), why));
-    }
-
-    void save() {
-        accounts.put(key(topic, partition), account.row());
     }
 }

@@ -10,12 +10,11 @@ import org.seamwatch.processors.state.Shelf;
 import org.seamwatch.processors.watch.Watch;
 import org.seamwatch.schemas.record.CaseReport;
 import org.seamwatch.schemas.record.CaseReportReader;
-import org.seamwatch.schemas.record.ClockRecord;
 import org.seamwatch.schemas.record.ReadResult;
 import org.seamwatch.schemas.record.RejectReason;
 
 /** One partition of {@code case-reports}: each record's difference to what its report said before goes to its series. */
-public final class ReportIntake {
+public final class ReportIntake implements Intake {
 
     private static final long SWEEP_HOURS = TimeUnit.DAYS.toHours(8);
 
@@ -44,29 +43,19 @@ public final class ReportIntake {
         this.out = out;
     }
 
-    /** Takes the next record of the partition, whatever its bytes. */
+    @Override
     public void accept(LogRecord record) {
-        input.enter(record, this::endHour);
-        if (ClockRecord.is(record.key(), record.value())) {
-            input.account().control();
-        } else {
-            Refusal why = take(record);
-            if (why != null) {
-                input.reject(record, why);
-            }
-        }
-        input.save();
+        input.accept(record, this::endHour, this::take);
     }
 
-    /**
-     * Passes every hour up to one without a record: for a replay that knows that the log holds no more of them.
-     *
-     * @param hour the last hour to be passed
-     * @param logStart first timestamp of the log, milliseconds since 1970-01-01T00Z; counts where the partition has
-     *     had no record yet
-     */
+    @Override
     public void pass(long hour, long logStart) {
         input.pass(hour, logStart, ended -> tally.end(ended, partition, out));
+    }
+
+    @Override
+    public Account account() {
+        return input.account();
     }
 
     private void endHour(long hour) {

@@ -9,12 +9,11 @@ import org.seamwatch.processors.state.Shelf;
 import org.seamwatch.processors.watch.Watch;
 import org.seamwatch.schemas.record.AlarmResponse;
 import org.seamwatch.schemas.record.AlarmResponseReader;
-import org.seamwatch.schemas.record.ClockRecord;
 import org.seamwatch.schemas.record.ReadResult;
 import org.seamwatch.schemas.record.RejectReason;
 
 /** One partition of {@code alarm-responses}. Judges a response's form only; whether its alarm is known, the series says. */
-public final class ResponseIntake {
+public final class ResponseIntake implements Intake {
 
     private final Watch watch;
     private final InputPartition input;
@@ -31,29 +30,19 @@ public final class ResponseIntake {
         this.out = out;
     }
 
-    /** Takes the next record of the partition, whatever its bytes. */
+    @Override
     public void accept(LogRecord record) {
-        input.enter(record, hour -> {});
-        if (ClockRecord.is(record.key(), record.value())) {
-            input.account().control();
-        } else {
-            Refusal why = take(record);
-            if (why != null) {
-                input.reject(record, why);
-            }
-        }
-        input.save();
+        input.accept(record, hour -> {}, this::take);
     }
 
-    /**
-     * Passes every hour up to one without a record: for a replay that knows that the log holds no more of them.
-     *
-     * @param hour the last hour to be passed
-     * @param logStart first timestamp of the log, milliseconds since 1970-01-01T00Z; counts where the partition has
-     *     had no record yet
-     */
+    @Override
     public void pass(long hour, long logStart) {
         input.pass(hour, logStart, ended -> {});
+    }
+
+    @Override
+    public Account account() {
+        return input.account();
     }
 
     private @Nullable Refusal take(LogRecord record) {

@@ -3,7 +3,6 @@ package org.seamwatch.topology.replay;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalLong;
-import org.jspecify.annotations.Nullable;
 import org.seamwatch.processors.flow.Hours;
 import org.seamwatch.processors.flow.InputSizes;
 import org.seamwatch.processors.flow.SeriesMessage;
@@ -18,6 +17,7 @@ import org.seamwatch.processors.series.SeriesStage;
 import org.seamwatch.processors.state.MemoryShelf;
 import org.seamwatch.processors.watch.Watch;
 import org.seamwatch.schemas.record.AccountingLine;
+import org.seamwatch.topology.Accounting;
 
 /**
  * Runs a log through the steps of the live service in this process: one intake for each input partition, one series
@@ -57,10 +57,14 @@ public final class LogReplay implements LogSink {
                 new MemoryShelf(), new MemoryShelf(), new MemoryShelf(), new MemoryShelf(), new MemoryShelf());
         IntakeOutput wire = new Wire(new SeriesStage(watch, series -> true, shelves, out), out);
         for (int p = 0; p < sizes.caseReports(); p++) {
-            partitions.add(new ReplayPartition(Topics.CASE_REPORTS, p, new Reports(watch, p, sizes, wire)));
+            partitions.add(new ReplayPartition(
+                    Topics.CASE_REPORTS,
+                    p,
+                    new ReportIntake(watch, p, sizes, new MemoryShelf(), new MemoryShelf(), new MemoryShelf(), wire)));
         }
         for (int p = 0; p < sizes.alarmResponses(); p++) {
-            partitions.add(new ReplayPartition(Topics.ALARM_RESPONSES, p, new Responses(watch, p, sizes, wire)));
+            partitions.add(new ReplayPartition(
+                    Topics.ALARM_RESPONSES, p, new ResponseIntake(watch, p, sizes, new MemoryShelf(), wire)));
         }
     }
 
@@ -159,61 +163,6 @@ public final class LogReplay implements LogSink {
         @Override
         public void reject(Rejection rejection) {
             out.rejected(rejection);
-        }
-    }
-
-    private static final class Reports implements ReplayPartition.Intake {
-
-        private final MemoryShelf accounts = new MemoryShelf();
-        private final ReportIntake intake;
-        private final int partition;
-
-        Reports(Watch watch, int partition, InputSizes sizes, IntakeOutput out) {
-            this.partition = partition;
-            this.intake =
-                    new ReportIntake(watch, partition, sizes, new MemoryShelf(), new MemoryShelf(), accounts, out);
-        }
-
-        @Override
-        public void accept(LogRecord record) {
-            intake.accept(record);
-        }
-
-        @Override
-        public void pass(long hour, long logStart) {
-            intake.pass(hour, logStart);
-        }
-
-        @Override
-        public byte @Nullable [] account() {
-            return accounts.get(Accounting.key(Topics.CASE_REPORTS, partition));
-        }
-    }
-
-    private static final class Responses implements ReplayPartition.Intake {
-
-        private final MemoryShelf accounts = new MemoryShelf();
-        private final ResponseIntake intake;
-        private final int partition;
-
-        Responses(Watch watch, int partition, InputSizes sizes, IntakeOutput out) {
-            this.partition = partition;
-            this.intake = new ResponseIntake(watch, partition, sizes, accounts, out);
-        }
-
-        @Override
-        public void accept(LogRecord record) {
-            intake.accept(record);
-        }
-
-        @Override
-        public void pass(long hour, long logStart) {
-            intake.pass(hour, logStart);
-        }
-
-        @Override
-        public byte @Nullable [] account() {
-            return accounts.get(Accounting.key(Topics.ALARM_RESPONSES, partition));
         }
     }
 }

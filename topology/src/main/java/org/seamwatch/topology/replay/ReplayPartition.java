@@ -1,21 +1,9 @@
 package org.seamwatch.topology.replay;
 
-import org.jspecify.annotations.Nullable;
-import org.seamwatch.processors.intake.LogRecord;
+import org.seamwatch.processors.intake.Intake;
 
 /** One input partition of a replay: the live intake behind it, and how far its log is. */
 final class ReplayPartition {
-
-    /** What an intake does, whatever it carries. */
-    interface Intake {
-
-        void accept(LogRecord record);
-
-        void pass(long hour, long logStart);
-
-        /** The row of its account; null before its first record. */
-        byte @Nullable [] account();
-    }
 
     private final String topic;
     private final int number;

@@ -23,6 +23,7 @@ import org.seamwatch.schemas.record.ReadResult;
 import org.seamwatch.schemas.record.RegionDay;
 import org.seamwatch.schemas.record.RejectedLine;
 import org.seamwatch.schemas.record.SeriesDay;
+import org.seamwatch.topology.Accounting;
 
 /**
  * The results of a run as files, sorted, so that runs that agree are equal byte for byte: {@value #REGION_DAYS} by

@@ -1,7 +1,6 @@
 package org.seamwatch.topology.service;
 
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import org.apache.kafka.streams.KafkaStreams;
 import org.apache.kafka.streams.KeyValue;
@@ -11,13 +10,11 @@ import org.apache.kafka.streams.state.QueryableStoreTypes;
 import org.apache.kafka.streams.state.ReadOnlyKeyValueStore;
 import org.seamwatch.processors.intake.Account;
 import org.seamwatch.schemas.record.AccountingLine;
+import org.seamwatch.topology.Accounting;
 import org.seamwatch.topology.Names;
 
 /** What became of every record that the tasks of this instance have read. */
 public final class Accounts {
-
-    private static final Comparator<AccountingLine> ORDER =
-            Comparator.comparing(AccountingLine::topic).thenComparingInt(AccountingLine::partition);
 
     private Accounts() {}
 
@@ -31,22 +28,13 @@ public final class Accounts {
                 each.forEachRemaining(row -> lines.add(line(row)));
             }
         }
-        lines.sort(ORDER);
+        lines.sort(Accounting.ORDER);
         return List.copyOf(lines);
     }
 
     private static AccountingLine line(KeyValue<String, byte[]> row) {
         int cut = row.key.lastIndexOf('|');
-        Account account = Account.from(row.value);
-        return new AccountingLine(
-                row.key.substring(0, cut),
-                Integer.parseInt(row.key.substring(cut + 1)),
-                account.read(),
-                account.accepted(),
-                account.duplicates(),
-                account.superseded(),
-                account.rejected(),
-                account.controls(),
-                account.reasons());
+        return Accounting.line(
+                row.key.substring(0, cut), Integer.parseInt(row.key.substring(cut + 1)), Account.from(row.value));
     }
 }

@@ -6,6 +6,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Properties;
 import java.util.concurrent.CountDownLatch;
+import java.util.stream.Stream;
 import org.apache.kafka.clients.producer.KafkaProducer;
 import org.apache.kafka.clients.producer.ProducerConfig;
 import org.apache.kafka.common.KafkaException;
@@ -18,6 +19,7 @@ import org.seamwatch.processors.watch.Watch;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.schemas.record.AccountingLine;
 import org.seamwatch.topology.FlowTopology;
+import org.seamwatch.topology.Names;
 
 /** One instance of the running flow. Topics must be there: see {@link TopicSetup}. */
 public final class StreamsService implements AutoCloseable {
@@ -63,6 +65,20 @@ public final class StreamsService implements AutoCloseable {
         return ApplicationId.of(plan);
     }
 
+    /** Full names of the topics that it reads from outside. */
+    public List<String> inputTopics() {
+        return Stream.of(Topics.CASE_REPORTS, Topics.ALARM_RESPONSES)
+                .map(topic -> plan.topics().prefix() + topic)
+                .toList();
+    }
+
+    /** Full names of the topics between its stages. */
+    public List<String> topicsBetween() {
+        return Stream.of(Names.REPORT_CHANGES, Names.RESPONSE_CHANGES)
+                .map(changes -> applicationId() + "-" + Names.repartitionTopic(changes))
+                .toList();
+    }
+
     /** How many stream threads have died. */
     public long failures() {
         return failures.failures();
@@ -90,9 +106,9 @@ public final class StreamsService implements AutoCloseable {
 
     private List<TopicPartition> inputPartitions() {
         List<TopicPartition> partitions = new ArrayList<>();
-        for (String topic : List.of(Topics.CASE_REPORTS, Topics.ALARM_RESPONSES)) {
+        for (String topic : inputTopics()) {
             for (int p = 0; p < plan.topics().partitions(); p++) {
-                partitions.add(new TopicPartition(plan.topics().prefix() + topic, p));
+                partitions.add(new TopicPartition(topic, p));
             }
         }
         return partitions;

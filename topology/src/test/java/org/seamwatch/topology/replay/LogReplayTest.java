@@ -26,6 +26,7 @@ import org.seamwatch.processors.series.SeriesStage;
 import org.seamwatch.processors.state.MemoryShelf;
 import org.seamwatch.processors.watch.Watch;
 import org.seamwatch.schemas.record.AccountingLine;
+import org.seamwatch.topology.Accounting;
 
 class LogReplayTest {
 

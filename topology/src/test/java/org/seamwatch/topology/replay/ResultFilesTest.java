@@ -8,10 +8,12 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.List;
+import java.util.TreeMap;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.seamwatch.schemas.InputException;
+import org.seamwatch.schemas.record.AccountingLine;
 import org.seamwatch.schemas.record.ReadResult;
 import org.seamwatch.schemas.record.RegionDay;
 import org.seamwatch.schemas.record.RejectReason;
@@ -57,7 +59,7 @@ class ResultFilesTest {
         files.rejected(rejected(1, 0));
         files.rejected(rejected(0, 10));
         files.rejected(rejected(0, 9));
-        files.write(folder, List.of(Accounting.line("case-reports", 0, null)));
+        files.write(folder, List.of(new AccountingLine("case-reports", 0, 0, 0, 0, 0, 0, 0, new TreeMap<>())));
         assertThat(Files.readAllLines(folder.resolve(ResultFiles.REGION_DAYS)))
                 .extracting(line ->
                         line.replaceAll(".*\"region\":\"(..)\",\"day\":\"(.*?)\".*\"revision\":(.).*", "$1 $2 $3"))

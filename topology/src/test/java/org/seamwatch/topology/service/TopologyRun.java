@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.List;
 import org.apache.kafka.clients.producer.ProducerRecord;
 import org.awaitility.Awaitility;
+import org.seamwatch.fixtures.broker.Drain;
 import org.seamwatch.fixtures.broker.KafkaBroker;
 import org.seamwatch.fixtures.broker.TopicTool;
 import org.seamwatch.processors.watch.Watch;
@@ -96,7 +97,7 @@ public final class TopologyRun implements AutoCloseable {
         Awaitility.await(records + " records of " + prefix)
                 .atMost(LIMIT)
                 .pollInterval(Duration.ofMillis(20))
-                .until(() -> drain.hasRead(records));
+                .until(() -> drain.read() >= records);
     }
 
     /** What the run has said so far. */
@@ -109,7 +110,8 @@ public final class TopologyRun implements AutoCloseable {
     }
 
     private Drain drain() {
-        return new Drain(tool, broker.bootstrapServers(), prefix, ApplicationId.of(plan.plan()));
+        StreamsService any = running.get(0);
+        return new Drain(tool, broker.bootstrapServers(), any.applicationId(), any.inputTopics(), any.topicsBetween());
     }
 
     @Override
