@@ -34,15 +34,21 @@ class DayJudgeTest {
 
     /** After any run each day is what judging it once more gives, whether its reading is remembered or computed. */
     @ParameterizedTest
-    @CsvSource({"1, count, 1, 9", "2, eb-rate, 1, 0", "3, share-residual, 1, 9", "4, share-residual, 7, 0", "5, rate, 3, 19"})
+    @CsvSource({
+        "1, count, 1, 9",
+        "2, eb-rate, 1, 0",
+        "3, share-residual, 1, 9",
+        "4, share-residual, 7, 0",
+        "5, rate, 3, 19"
+    })
     void shouldGiveTheSameFromMemoryAndComputedAgain(int seed, String measure, int window, int permutations) {
         Watch watch = DESK.measure(measure, permutations)
                 .days(1, 20, window)
                 .holidays(new HolidayPlan(LocalDate.of(2024, 2, 10), "R00*,R0404"))
                 .watch();
         SeriesSpec spec = spec(watch);
-        StageBench bench =
-                new StageBench(watch).takeAll(new RandomFeed(seed, 48, 14).log(2).messages(watch));
+        StageBench bench = new StageBench(watch)
+                .takeAll(new RandomFeed(seed, 48, 14).log(2).messages(watch));
         CountBook counts = new CountBook(spec, bench.counts);
         DayBook days = new DayBook(spec.id(), bench.days);
         SeriesBook book = book(bench, spec);
@@ -57,8 +63,7 @@ class DayJudgeTest {
             assertThat(known).isNotNull();
             long cases = counts.total(day);
             DayState remembered = judge.judge(d, cases, DayJudgeTest::refuse, before, known, Set.of());
-            DayState computed =
-                    judge.judge(d, cases, () -> counts.input(d, book.begins()), before, known, Set.of(day));
+            DayState computed = judge.judge(d, cases, () -> counts.input(d, book.begins()), before, known, Set.of(day));
             assertThat(remembered).isEqualTo(computed);
             SeriesDay said = known.day();
             assertThat(computed.day().at(said.revision(), said.closedAt())).isEqualTo(said);
@@ -85,7 +90,8 @@ class DayJudgeTest {
         DayState known = days.get(day);
         DayJudge judge = new DayJudge(spec);
         int[] asked = new int[1];
-        for (LocalDate changed : List.of(day, day.minusDays(14), day.minusDays(69), day.minusDays(13), day.plusDays(1))) {
+        for (LocalDate changed :
+                List.of(day, day.minusDays(14), day.minusDays(69), day.minusDays(13), day.plusDays(1))) {
             judge.judge(
                     day,
                     counts.total(day),
@@ -102,7 +108,8 @@ class DayJudgeTest {
 
     @Test
     void shouldNameUnjudgedRegionsInTheDay() {
-        Watch watch = DESK.holidays(new HolidayPlan(LocalDate.of(2024, 2, 10), "R0404,R0000")).watch();
+        Watch watch = DESK.holidays(new HolidayPlan(LocalDate.of(2024, 2, 10), "R0404,R0000"))
+                .watch();
         StageBench bench =
                 new StageBench(watch).takeAll(new RandomFeed(7, 40, 2).log(1).messages(watch));
 

@@ -91,7 +91,8 @@ class SameLogSameOutputTest {
                 .watch();
         List<List<SeriesMessage>> streams = new RandomFeed(9, 150, 33).log(1).messages(watch);
         StageBench bench = new StageBench(watch).takeAll(streams);
-        StageBench hoarder = new StageBench(watch, series -> true, new MemoryShelf(), new Hoard(), new Hoard()).takeAll(streams);
+        StageBench hoarder =
+                new StageBench(watch, series -> true, new MemoryShelf(), new Hoard(), new Hoard()).takeAll(streams);
 
         assertThat(bench.lines).isEqualTo(hoarder.lines).hasSizeGreaterThan(1_000);
         int keep = watch.series().values().iterator().next().keepDays();
@@ -105,8 +106,7 @@ class SameLogSameOutputTest {
     @Test
     void shouldNotDependOnTheOrderOfAShelfsRows() {
         List<List<SeriesMessage>> streams = new RandomFeed(2, 45, 20).log(4).messages(WATCH);
-        StageBench backwards = new StageBench(
-                WATCH, series -> true, new Backwards(), new Backwards(), new Backwards());
+        StageBench backwards = new StageBench(WATCH, series -> true, new Backwards(), new Backwards(), new Backwards());
 
         assertThat(backwards.takeAll(streams).lines).isEqualTo(new StageBench(WATCH).takeAll(streams).lines);
     }

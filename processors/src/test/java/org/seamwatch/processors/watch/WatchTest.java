@@ -27,7 +27,8 @@ class WatchTest {
         assertThat(watch.route("norovirus", "R0304")).extracting(SeriesSpec::id).containsExactly("gridland/norovirus");
         assertThat(watch.route("mumps", "R0304")).isEmpty();
         assertThat(watch.route("norovirus", "R0909")).isEmpty();
-        assertThat(List.of(watch.knowsCondition("mumps"), watch.knowsRegion("R0909"))).containsOnly(false);
+        assertThat(List.of(watch.knowsCondition("mumps"), watch.knowsRegion("R0909")))
+                .containsOnly(false);
         assertThat(watch.regionAt(new Position(4.5, 0.5))).isEqualTo("R0400");
         assertThat(watch.regionAt(new Position(5.5, 0.5))).isNull();
     }
@@ -56,8 +57,11 @@ class WatchTest {
 
     @Test
     void shouldHaveNoPopulationsUnlessEveryRegionHasOne() {
-        assertThat(first(TestDesk.small().unpopulated().watch()).ground().populations()).isNull();
-        assertThat(first(TestDesk.small().watch()).ground().populations()).hasSize(25).startsWith(10_000, 10_100);
+        assertThat(first(TestDesk.small().unpopulated().watch()).ground().populations())
+                .isNull();
+        assertThat(first(TestDesk.small().watch()).ground().populations())
+                .hasSize(25)
+                .startsWith(10_000, 10_100);
     }
 
     @Test
@@ -110,7 +114,14 @@ class WatchTest {
     }
 
     private static double limit(TestDesk desk) {
-        Double upper = first(desk.watch()).statistics().get(0).board().charts().get(0).action().upper();
+        Double upper = first(desk.watch())
+                .statistics()
+                .get(0)
+                .board()
+                .charts()
+                .get(0)
+                .action()
+                .upper();
         return upper == null ? Double.NaN : upper;
     }
 }
