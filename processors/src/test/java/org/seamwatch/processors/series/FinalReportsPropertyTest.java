@@ -37,7 +37,7 @@ class FinalReportsPropertyTest {
 
     static Stream<Arguments> cases() {
         Stream.Builder<Arguments> cases = Stream.builder();
-        for (int seed = 0; seed < 30; seed++) {
+        for (int seed = 0; seed < 60; seed++) {
             cases.add(Arguments.of(seed, seed % WATCHES.size()));
         }
         return cases.build();
