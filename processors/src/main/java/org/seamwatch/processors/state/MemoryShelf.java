@@ -9,24 +9,7 @@ import org.jspecify.annotations.Nullable;
 /** Rows in memory, for replays. */
 public final class MemoryShelf implements Shelf {
 
-    private final TreeMap<String, byte[]> rows = new TreeMap<>(MemoryShelf::compareBytes);
-
-    /**
-     * The order of the keys' bytes in UTF-8, which is that of their code points. It differs from the order of Java's
-     * chars only where one of two chars that differ is half of a pair.
-     */
-    private static int compareBytes(String a, String b) {
-        int shorter = Math.min(a.length(), b.length());
-        for (int i = 0; i < shorter; i++) {
-            char x = a.charAt(i);
-            char y = b.charAt(i);
-            if (x != y) {
-                boolean oneIsHalf = Character.isSurrogate(x) != Character.isSurrogate(y);
-                return oneIsHalf ? Character.isSurrogate(x) ? 1 : -1 : Character.compare(x, y);
-            }
-        }
-        return Integer.compare(a.length(), b.length());
-    }
+    private final TreeMap<String, byte[]> rows = new TreeMap<>();
 
     @Override
     public byte @Nullable [] get(String key) {

@@ -16,7 +16,7 @@ public interface Shelf {
     void remove(String key);
 
     /**
-     * All rows whose key begins with a prefix, in the order of the keys' bytes.
+     * All rows whose key begins with a prefix, in an order of the shelf's own that no result may depend on.
      *
      * @param prefix ends in an ASCII character
      */

@@ -37,7 +37,7 @@ class FinalReportsPropertyTest {
 
     static Stream<Arguments> cases() {
         Stream.Builder<Arguments> cases = Stream.builder();
-        for (int seed = 0; seed < 40; seed++) {
+        for (int seed = 0; seed < 60; seed++) {
             cases.add(Arguments.of(seed, seed % WATCHES.size()));
         }
         return cases.build();
@@ -102,7 +102,7 @@ class FinalReportsPropertyTest {
         List<Change> changes = new ArrayList<>();
         int revised = 0;
         int usable = 0;
-        for (int seed = 0; seed < 40; seed++) {
+        for (int seed = 0; seed < 10; seed++) {
             Watch watch = WATCHES.get(seed % WATCHES.size());
             StageBench live = new StageBench(watch)
                     .takeAll(new RandomFeed(seed, DAYS, LONGEST_DELAY).log(2).messages(watch));

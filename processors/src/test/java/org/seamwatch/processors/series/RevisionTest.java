@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.time.Instant;
 import java.time.LocalDate;
+import java.util.List;
 import org.junit.jupiter.api.Test;
 import org.seamwatch.processors.intake.Say;
 import org.seamwatch.processors.watch.TestDesk;
@@ -177,34 +178,37 @@ class RevisionTest {
     /** 11 February is counted anew too late to be judged again; the days that read it and are judged again later see it. */
     @Test
     void shouldJudgeADayAgainOnTheCountsAsTheyNowStand() {
-        TestDesk desk = TestDesk.small().days(1, 3, 1).from("2024-02-01").measure("share-residual", 0);
+        TestDesk desk = TestDesk.small().days(1, 6, 1).from("2024-02-01").measure("share-residual", 0);
         for (int day = 0; day < 40; day++) {
             ordinary(day);
         }
         say("2024-03-11T12:30:00Z", "R0404", FIRST.plusDays(10), 200);
         log.clock("2024-03-12T00:00:00Z");
-        // Two closes later a day is judged again, and those after it.
-        say("2024-03-13T12:30:00Z", "R0404", LocalDate.of(2024, 3, 10), 1);
+        // After that close 6 March is dirty, and the days up to the 9th, judged before it, are judged again.
+        say("2024-03-12T12:30:00Z", "R0404", LocalDate.of(2024, 3, 6), 1);
         log.clock("2024-03-14T00:00:00Z");
         StageBench late = run(desk);
-        StageBench cold = new StageBench(desk.watch());
-        RevisionTest again = new RevisionTest();
+
+        RevisionTest inTime = new RevisionTest();
         for (int day = 0; day < 40; day++) {
             if (day == 10) {
-                again.say("2024-02-11T10:00:00Z", "R0404", FIRST.plusDays(10), 200);
+                inTime.say("2024-02-11T10:00:00Z", "R0404", FIRST.plusDays(10), 200);
             }
-            again.ordinary(day);
-            if (day == 38) {
-                again.say("2024-03-10T23:10:00Z", "R0404", LocalDate.of(2024, 3, 10), 1);
+            inTime.ordinary(day);
+            if (day == 34) {
+                inTime.say("2024-03-06T23:10:00Z", "R0404", LocalDate.of(2024, 3, 6), 1);
             }
         }
-        again.log.clock("2024-03-14T00:00:00Z");
-        cold.takeAll(again.log.messages(desk.watch()));
+        inTime.log.clock("2024-03-14T00:00:00Z");
+        StageBench cold = inTime.run(desk);
 
-        assertThat(moran(late.lastDay("2024-03-11")).i())
-                .isNotNull()
-                .isEqualTo(moran(cold.lastDay("2024-03-11")).i());
-        assertThat(late.revisions("2024-03-09")).hasSize(1);
+        for (String day : List.of("2024-03-06", "2024-03-07", "2024-03-08", "2024-03-09", "2024-03-10")) {
+            assertThat(moran(late.lastDay(day)).i())
+                    .isNotNull()
+                    .isEqualTo(moran(cold.lastDay(day)).i());
+        }
+        assertThat(late.revisions("2024-03-08")).hasSize(2);
+        assertThat(late.revisions("2024-03-05")).hasSize(1);
     }
 
     @Test

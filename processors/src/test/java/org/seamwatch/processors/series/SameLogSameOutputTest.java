@@ -25,11 +25,11 @@ class SameLogSameOutputTest {
     private static final Watch WATCH = DESK.watch();
 
     @ParameterizedTest
-    @ValueSource(ints = {1, 2, 3, 4, 5, 6, 7, 8})
+    @ValueSource(ints = {1, 2, 3, 4})
     void shouldNotDependOnTheOrderOfPartitionsNorOnRestarts(int seed) {
         List<List<SeriesMessage>> streams = new RandomFeed(seed, 45, 20).log(4).messages(WATCH);
         List<String> expected = new StageBench(WATCH).takeAll(streams).lines;
-        for (int mix = 0; mix < 3; mix++) {
+        for (int mix = 0; mix < 2; mix++) {
             StageBench mixed = new StageBench(WATCH).takeMixed(streams, new Random(100 * seed + mix), WATCH);
             assertThat(mixed.lines).isEqualTo(expected);
         }
@@ -40,7 +40,7 @@ class SameLogSameOutputTest {
     }
 
     @ParameterizedTest
-    @ValueSource(ints = {1, 2, 3})
+    @ValueSource(ints = {1, 2})
     void shouldNotDependOnTheNumberOfInputPartitions(int seed) {
         RandomFeed feed = new RandomFeed(seed, 45, 20);
         List<String> one = new StageBench(WATCH).takeAll(feed.log(1).messages(WATCH)).lines;
@@ -89,21 +89,29 @@ class SameLogSameOutputTest {
                 .days(1, 6, 7)
                 .measure("share-residual", 0)
                 .watch();
-        List<List<SeriesMessage>> streams = new RandomFeed(9, 240, 33).log(1).messages(watch);
+        List<List<SeriesMessage>> streams = new RandomFeed(9, 150, 33).log(1).messages(watch);
         StageBench bench = new StageBench(watch).takeAll(streams);
-        StageBench hoarder = new StageBench(watch, series -> true, new Hoard(), new Hoard()).takeAll(streams);
+        StageBench hoarder =
+                new StageBench(watch, series -> true, new MemoryShelf(), new Hoard(), new Hoard()).takeAll(streams);
 
         assertThat(bench.lines).isEqualTo(hoarder.lines).hasSizeGreaterThan(1_000);
         int keep = watch.series().values().iterator().next().keepDays();
         assertThat(keep).isEqualTo(6 + 69 + 7 + 7);
         assertThat(bench.days.rows("")).hasSize(keep);
         assertThat(bench.counts.rows("").size()).isLessThanOrEqualTo(keep + 3);
-        assertThat(bench.pending.size()).isZero();
-        assertThat(hoarder.days.rows("").size()).isGreaterThan(240);
+        assertThat(bench.pending.rows("")).isEmpty();
+        assertThat(hoarder.days.rows("").size()).isGreaterThan(150);
     }
 
-    /** A shelf that keeps everything. */
-    private static final class Hoard implements Shelf {
+    @Test
+    void shouldNotDependOnTheOrderOfAShelfsRows() {
+        List<List<SeriesMessage>> streams = new RandomFeed(2, 45, 20).log(4).messages(WATCH);
+        StageBench backwards = new StageBench(WATCH, series -> true, new Backwards(), new Backwards(), new Backwards());
+
+        assertThat(backwards.takeAll(streams).lines).isEqualTo(new StageBench(WATCH).takeAll(streams).lines);
+    }
+
+    private static class Wrapped implements Shelf {
 
         private final MemoryShelf rows = new MemoryShelf();
 
@@ -118,7 +126,9 @@ class SameLogSameOutputTest {
         }
 
         @Override
-        public void remove(String key) {}
+        public void remove(String key) {
+            rows.remove(key);
+        }
 
         @Override
         public List<Row> rows(String prefix) {
@@ -127,7 +137,25 @@ class SameLogSameOutputTest {
 
         @Override
         public void visit(RowVisitor visitor) {
-            rows.visit(visitor);
+            rows("").forEach(row -> visitor.row(row.key(), row.value()));
+        }
+    }
+
+    /** A shelf that keeps everything. */
+    private static final class Hoard extends Wrapped {
+
+        @Override
+        public void remove(String key) {}
+    }
+
+    /** A shelf that gives its rows from the last to the first. */
+    private static final class Backwards extends Wrapped {
+
+        @Override
+        public List<Row> rows(String prefix) {
+            List<Row> rows = super.rows(prefix);
+            Collections.reverse(rows);
+            return rows;
         }
     }
 

@@ -22,7 +22,7 @@ import org.seamwatch.schemas.record.SeriesDay;
 final class StageBench implements SeriesOutput {
 
     final MemoryShelf progress = new MemoryShelf();
-    final MemoryShelf pending = new MemoryShelf();
+    final Shelf pending;
     final Shelf counts;
     final Shelf days;
     final MemoryShelf books = new MemoryShelf();
@@ -40,10 +40,11 @@ final class StageBench implements SeriesOutput {
     }
 
     StageBench(Watch watch, Predicate<String> mine) {
-        this(watch, mine, new MemoryShelf(), new MemoryShelf());
+        this(watch, mine, new MemoryShelf(), new MemoryShelf(), new MemoryShelf());
     }
 
-    StageBench(Watch watch, Predicate<String> mine, Shelf counts, Shelf days) {
+    StageBench(Watch watch, Predicate<String> mine, Shelf pending, Shelf counts, Shelf days) {
+        this.pending = pending;
         this.mine = mine;
         this.counts = counts;
         this.days = days;

@@ -4,11 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 
 import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
-import java.util.Arrays;
-import java.util.Comparator;
 import java.util.List;
-import java.util.Random;
-import java.util.TreeSet;
 import org.junit.jupiter.api.Test;
 
 class MemoryShelfTest {
@@ -25,28 +21,6 @@ class MemoryShelfTest {
 
         assertThat(shelf.rows("a|")).extracting(Shelf.Row::key).containsExactly("a|1", "a|10", "a|2");
         assertThat(shelf.rows("c")).isEmpty();
-    }
-
-    @Test
-    void shouldKeepTheOrderOfTheKeysBytes() {
-        String[] pieces = {"a", "|", "\u00e4", "\uffee", "\ud83e\udda0", "\u20ac", "\ud800\udc00", "\ue000"};
-        Random random = new Random(5);
-        TreeSet<byte[]> expected = new TreeSet<>(Arrays::compareUnsigned);
-        for (int i = 0; i < 500; i++) {
-            StringBuilder key = new StringBuilder("k|");
-            for (int n = random.nextInt(5); n >= 0; n--) {
-                key.append(pieces[random.nextInt(pieces.length)]);
-            }
-            shelf.put(key.toString(), new byte[0]);
-            expected.add(utf8(key.toString()));
-        }
-        List<String> inOrder = expected.stream()
-                .map(key -> new String(key, StandardCharsets.UTF_8))
-                .toList();
-
-        assertThat(shelf.rows("k|")).extracting(Shelf.Row::key).isEqualTo(inOrder);
-        assertThat(inOrder)
-                .isNotEqualTo(inOrder.stream().sorted(Comparator.naturalOrder()).toList());
     }
 
     @Test
