@@ -25,6 +25,7 @@ import org.seamwatch.schemas.json.Json;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.schemas.record.AccountingLine;
 import org.seamwatch.schemas.record.AlarmChange;
+import org.seamwatch.topology.Accounting;
 import org.seamwatch.topology.service.StreamsService;
 import org.seamwatch.topology.service.TopicSetup;
 
@@ -177,8 +178,22 @@ final class DemoRun implements AutoCloseable {
         return results;
     }
 
+    /** What became of every record, held against what the topics hold. */
     List<AccountingLine> accounts() {
-        return service.accounting();
+        List<AccountingLine> accounts = service.accounting();
+        for (AccountingLine line : accounts) {
+            String topic = plan.topics().prefix() + line.topic();
+            long held = topics.endOffsets(topic).getOrDefault(line.partition(), 0L)
+                    - topics.startOffsets(topic).getOrDefault(line.partition(), 0L);
+            if (line.read() != held || !Accounting.balances(line)) {
+                throw new CommandFailure(
+                        "the accounts do not balance: " + line + ", the partition holds " + held, null);
+            }
+        }
+        long read = accounts.stream().mapToLong(AccountingLine::read).sum();
+        console.say(String.format(
+                Locale.ROOT, "Everything is accounted for: %,d records read, as many as the input topics hold.", read));
+        return accounts;
     }
 
     @Override
