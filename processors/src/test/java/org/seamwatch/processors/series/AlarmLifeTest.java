@@ -169,14 +169,14 @@ class AlarmLifeTest {
         days(60, 64, true);
         String alarm = run().alarms.get(0).alarm();
         List<String> verdicts = List.of("acknowledged", "under-investigation", "known-event");
-        for (int i = 0; i < 12; i++) {
+        for (int i = 0; i < 60; i++) {
             log.respond("2024-03-05T10:20:00Z", SERIES, response(alarm, verdicts.get(i % 3)));
         }
         log.clock("2024-03-05T12:00:00Z");
         StageBench bench = run();
 
-        assertThat(bench.alarms).hasSize(13);
-        for (int i = 0; i < 12; i++) {
+        assertThat(bench.alarms).hasSize(61);
+        for (int i = 0; i < 60; i++) {
             AlarmChange change = bench.alarms.get(i + 1);
             assertThat(change.response()).isNotNull();
             assertThat(change.response()
