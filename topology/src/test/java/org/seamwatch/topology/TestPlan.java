@@ -13,7 +13,10 @@ import org.seamwatch.schemas.geography.GeographyReader;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.schemas.plan.PlanReader;
 
-/** Plans over Northmarch, read from files as users' plans are. */
+/**
+ * Plans over Northmarch, read from files as users' plans are. Rejected records are kept for a century: tests replay
+ * times that lie years back, and a broker deletes by the record's time.
+ */
 public final class TestPlan {
 
     private final Path folder;
@@ -97,7 +100,7 @@ public final class TestPlan {
         }
         return text + """
                 run: { threads: %d }
-                topics: { prefix: "%s", partitions: %d, seriesPartitions: %d, replication: 1 }
+                topics: { prefix: "%s", partitions: %d, seriesPartitions: %d, replication: 1, rejectedRetention: 36500d }
                 geographies:
                   - { file: northmarch.geojson, id: northmarch, timeZone: UTC, regionId: id, regionName: name, population: population, populationYear: 2023 }
                 desk: { falseAlarmsPerYear: %s }

@@ -3,8 +3,12 @@ package org.seamwatch.topology.service;
 import java.util.concurrent.ExecutionException;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
+import java.util.concurrent.locks.LockSupport;
+import java.util.function.Supplier;
 import org.apache.kafka.common.KafkaFuture;
+import org.apache.kafka.common.errors.DisconnectException;
 import org.apache.kafka.common.errors.RetriableException;
+import org.jspecify.annotations.Nullable;
 import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.plan.Plan;
 
@@ -12,6 +16,7 @@ import org.seamwatch.schemas.plan.Plan;
 final class Answers {
 
     private static final long LIMIT_SECONDS = 60;
+    private static final long PAUSE_NANOS = TimeUnit.MILLISECONDS.toNanos(50);
 
     private final Plan plan;
 
@@ -19,11 +24,12 @@ final class Answers {
         this.plan = plan;
     }
 
+    /** The answer to a question that is asked once. */
     <T> T of(KafkaFuture<T> answer, String doing) {
         try {
             return answer.get(LIMIT_SECONDS, TimeUnit.SECONDS);
         } catch (ExecutionException e) {
-            if (e.getCause() instanceof RetriableException) {
+            if (isSilence(e.getCause())) {
                 throw silent(doing);
             }
             throw new IllegalStateException(doing + " failed: " + e.getCause(), e.getCause());
@@ -33,6 +39,25 @@ final class Answers {
             Thread.currentThread().interrupt();
             throw new IllegalStateException(doing + " was interrupted", e);
         }
+    }
+
+    /** The answer to a question that is asked again for as long as the broker says that it cannot know it yet. */
+    <T> T ofAgain(Supplier<KafkaFuture<T>> question, String doing) {
+        long end = System.nanoTime() + TimeUnit.SECONDS.toNanos(LIMIT_SECONDS);
+        while (true) {
+            try {
+                return of(question.get(), doing);
+            } catch (IllegalStateException e) {
+                if (!(e.getCause() instanceof RetriableException) || System.nanoTime() > end) {
+                    throw e;
+                }
+                LockSupport.parkNanos(PAUSE_NANOS);
+            }
+        }
+    }
+
+    private static boolean isSilence(@Nullable Throwable cause) {
+        return cause instanceof org.apache.kafka.common.errors.TimeoutException || cause instanceof DisconnectException;
     }
 
     private InputException silent(String doing) {

@@ -82,7 +82,7 @@ public final class TopicSetup {
                 ends.put(new TopicPartition(spec.name(), p), OffsetSpec.latest());
             }
         }
-        answers.of(admin.listOffsets(ends).all(), "waiting for the leaders of topics");
+        answers.ofAgain(() -> admin.listOffsets(ends).all(), "waiting for the leaders of topics");
     }
 
     private void checkCounts(List<TopicSpec> present, Set<String> existing) {

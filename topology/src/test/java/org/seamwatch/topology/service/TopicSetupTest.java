@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.List;
 import java.util.Map;
 import org.apache.kafka.clients.admin.Config;
@@ -78,7 +79,8 @@ class TopicSetupTest {
         assertThat(value("new.alarms", "cleanup.policy")).isEqualTo("delete");
         assertThat(value("new.alarms", "retention.ms")).isEqualTo("-1");
         assertThat(value("new.alarms", "message.timestamp.after.max.ms")).isEqualTo(String.valueOf(Long.MAX_VALUE));
-        assertThat(value("new.rejected-reports", "retention.ms")).isEqualTo("2592000000");
+        assertThat(value("new.rejected-reports", "retention.ms"))
+                .isEqualTo(String.valueOf(Duration.ofDays(36_500).toMillis()));
         assertThat(TopicSetup.prepare(plan("new.", 3, 2))).isEmpty();
     }
 
