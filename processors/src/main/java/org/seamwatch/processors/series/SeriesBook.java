@@ -8,7 +8,7 @@ import org.jspecify.annotations.Nullable;
 /**
  * How far a series is.
  *
- * @param hash hash of the series' plan that its states were made under
+ * @param hash hash of what the series learned from when its states were made
  * @param begins first day that is counted
  * @param learnsFrom first day that is judged; later than begins where the plan has changed
  * @param lastClosed last closed day; null before the first

@@ -23,9 +23,20 @@ final class PlanHash {
         return sha256(text.toString());
     }
 
-    /** Of one series: its budget too, which depends on the shares of the others. */
-    static String of(Plan plan, SeriesPlan series, Geography geography) {
-        return sha256("budget " + Budget.of(plan, series).series() + text(geography) + text(series));
+    /**
+     * Of what one series learns from: what is computed, on what, and how it is charted. Limits, budget, permutations and
+     * the times of close and revision are no part of it: with others of them, learning goes on.
+     */
+    static String of(SeriesPlan series, Geography geography) {
+        List<Object> parts = List.of(
+                series.dayOf(),
+                series.windowDays(),
+                series.measure(),
+                series.contiguity(),
+                series.weights(),
+                series.thinBelow(),
+                series.holidays());
+        return sha256(text(geography) + "\nlearns " + parts + charts(series));
     }
 
     private static String text(Geography geography) {
@@ -53,8 +64,13 @@ final class PlanHash {
                 s.warmUpDays(),
                 s.holidays());
         parts.forEach(part -> text.append(part).append(' '));
+        return text.append(charts(s)).toString();
+    }
+
+    private static String charts(SeriesPlan s) {
+        StringBuilder text = new StringBuilder();
         for (StatisticName name : s.statistics()) {
-            text.append(name.word()).append(s.charts().get(name)).append(' ');
+            text.append(' ').append(name.word()).append(s.charts().get(name));
         }
         return text.toString();
     }

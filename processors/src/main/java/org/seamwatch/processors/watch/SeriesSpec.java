@@ -22,7 +22,7 @@ import org.seamwatch.schemas.plan.SeriesPlan;
  * @param budget false alarms a year
  * @param statistics what is computed, in the plan's order
  * @param keepDays days before the last closed one that late reports may still reach
- * @param hash of all that its results depend on beside the log, in hexadecimal digits
+ * @param hash of what it learns from beside the log, in hexadecimal digits
  */
 public record SeriesSpec(
         String id,

@@ -73,7 +73,7 @@ final class SpecMaker {
                 budget,
                 statistics,
                 keepDays(each),
-                PlanHash.of(plan, each, geography));
+                PlanHash.of(each, geography));
     }
 
     private int keepDays(SeriesPlan each) {

@@ -201,7 +201,7 @@ class AlarmLifeTest {
         int closed = bench.seriesDays.size();
         String last = bench.seriesDays.get(closed - 1).day().toString();
 
-        Watch after = DESK.limits(5, 28, 3).watch();
+        Watch after = DESK.limits(4, 28, 3).watch();
         bench.restart(after);
         days(64, 70, false);
         log.say("2024-03-11T12:00:00Z", Say.of("late", "R0000", "2024-03-01").count(2));

@@ -67,8 +67,9 @@ class WatchTest {
     @Test
     void shouldHashAllThatResultsDependOn() {
         TestDesk desk = TestDesk.small();
-        String hash = first(desk.watch()).hash();
-        assertThat(first(TestDesk.small().watch()).hash()).isEqualTo(hash).hasSize(64);
+        assertThat(TestDesk.small().watch().hash())
+                .isEqualTo(desk.watch().hash())
+                .hasSize(64);
         List<TestDesk> others = List.of(
                 desk.zone("Europe/Berlin"),
                 desk.from("2024-01-01"),
@@ -83,12 +84,28 @@ class WatchTest {
                 desk.limits(1, 5, 7),
                 desk.conditions("influenza", "norovirus"),
                 desk.holidays(new HolidayPlan(java.time.LocalDate.of(2024, 1, 6), "R0*")));
-        List<String> hashes = others.stream().map(d -> first(d.watch()).hash()).toList();
-
-        assertThat(hashes).doesNotHaveDuplicates().doesNotContain(hash);
         assertThat(others.stream().map(d -> d.watch().hash()).toList())
                 .doesNotHaveDuplicates()
                 .doesNotContain(desk.watch().hash());
+    }
+
+    @Test
+    void shouldLearnAfreshOnlyWhereWhatIsLearnedFromHasChanged() {
+        TestDesk desk = TestDesk.small();
+        String hash = first(desk.watch()).hash();
+        List<TestDesk> learningAfresh = List.of(
+                desk.zone("Europe/Berlin"),
+                desk.dayOf(DayOf.REPORT),
+                desk.measure("rate", 99),
+                desk.holidays(new HolidayPlan(java.time.LocalDate.of(2024, 1, 6), "R0*")));
+        List<TestDesk> learningOn =
+                List.of(desk.conditions("influenza", "norovirus"), desk.measure("count", 9), desk.days(1, 27, 1));
+
+        assertThat(learningAfresh.stream().map(d -> first(d.watch()).hash()).toList())
+                .doesNotHaveDuplicates()
+                .doesNotContain(hash);
+        assertThat(learningOn.stream().map(d -> first(d.watch()).hash()).toList())
+                .containsOnly(hash);
     }
 
     @Test

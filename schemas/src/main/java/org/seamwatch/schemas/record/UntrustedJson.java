@@ -22,6 +22,9 @@ final class UntrustedJson {
     /** Longest name or text of a known field, in characters; the contracts' own limits are far below. */
     static final int MAX_TEXT = 64 * 1024;
 
+    /** Longest record, in bytes; a report takes some hundreds. */
+    static final int MAX_BYTES = 256 * 1024;
+
     private static final JsonFactory FACTORY = JsonFactory.builder()
             .streamReadConstraints(StreamReadConstraints.builder()
                     .maxNestingDepth(MAX_DEPTH)
@@ -42,6 +45,12 @@ final class UntrustedJson {
     static RawObject read(byte @Nullable [] value, KnownFields known) throws Refused {
         if (value == null) {
             throw new Refused(RejectReason.NULL_VALUE, "", "a record must have a value, had none");
+        }
+        if (value.length > MAX_BYTES) {
+            throw new Refused(
+                    RejectReason.TOO_LARGE,
+                    "",
+                    "a record must have at most " + MAX_BYTES + " bytes, had " + value.length);
         }
         try (JsonParser parser = FACTORY.createParser(text(value))) {
             return document(parser, known);

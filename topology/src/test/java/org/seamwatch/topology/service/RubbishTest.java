@@ -76,6 +76,7 @@ class RubbishTest {
                 "x",
                 good.replace("}", ",\"more\":" + "{\"a\":".repeat(5_000) + "1" + "}".repeat(5_000) + "}"));
         rubbish("too-large", "x", good.replace("NM-001", "x".repeat(3 << 20)));
+        rubbish("too-large", "x", good.replace("}", ",\"more\":\"" + "x".repeat(3 << 20) + "\"}"));
         rubbish("null-key", null, bytes(good));
         rubbish("null-value", "x", (byte[]) null);
         rubbish("key-mismatch", "y", good);
