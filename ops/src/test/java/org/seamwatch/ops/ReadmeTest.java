@@ -7,7 +7,6 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Arrays;
 import java.util.List;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -24,23 +23,21 @@ import org.seamwatch.schemas.record.ReadResult;
 class ReadmeTest {
 
     private static final Pattern BLOCK = Pattern.compile("(?m)^( *)```(\\w+)\\n(.*?)^ *```", Pattern.DOTALL);
+    private static final Pattern SPACE = Pattern.compile(" +");
     private static final String COMMAND = "ops/seamwatch ";
 
-    @TempDir
-    private Path folder;
-
     @Test
-    void shouldRunTheDemoReplayItsLogAndGetTheSameBytes() throws IOException {
+    void shouldRunTheDemoReplayItsLogAndGetTheSameBytes(@TempDir Path folder) throws IOException {
         List<String> lines = new ArrayList<>();
         blocks("sh").forEach(block -> lines.addAll(block.lines().toList()));
         int compared = 0;
         for (String line : lines) {
-            String[] words = line.strip().split(" ");
+            List<String> words = SPACE.splitAsStream(line.strip()).toList();
             if (line.startsWith(COMMAND)) {
-                Run run = Run.of(inFolder(Arrays.copyOfRange(words, 1, words.length)));
+                Run run = Run.of((Object[]) inFolder(folder, words.subList(1, words.size())));
                 assertThat(run.code()).as(line + "\n" + run.err()).isZero();
-            } else if (words[0].equals("cmp")) {
-                assertThat(folder.resolve(words[2])).hasSameBinaryContentAs(folder.resolve(words[1]));
+            } else if (words.get(0).equals("cmp")) {
+                assertThat(folder.resolve(words.get(2))).hasSameBinaryContentAs(folder.resolve(words.get(1)));
                 compared++;
             }
         }
@@ -53,8 +50,8 @@ class ReadmeTest {
                 .hasSameBinaryContentAs(folder.resolve("demo-out/accounting.json"));
     }
 
-    private String[] inFolder(String... words) {
-        return Arrays.stream(words)
+    private static String[] inFolder(Path folder, List<String> words) {
+        return words.stream()
                 .map(word -> word.startsWith("demo-out") || word.equals("again")
                         ? folder.resolve(word).toString()
                         : word)
@@ -62,7 +59,7 @@ class ReadmeTest {
     }
 
     @Test
-    void shouldCheckThePlan() throws IOException {
+    void shouldCheckThePlan(@TempDir Path folder) throws IOException {
         String plan = blocks("yaml").get(0);
         Files.writeString(folder.resolve("plan.yaml"), plan);
         new ScenarioWriter(Scenario.of(ScenarioOptions.defaults().withDays(40))).write(folder.resolve("made-up"));

@@ -86,7 +86,7 @@ class ReplayCommandTest {
     @Test
     void shouldAccountForEveryLine() throws IOException {
         List<AccountingLine> accounts = accounts(first);
-        assertThat(accounts).hasSize(12).allMatch(Accounting::balances);
+        assertThat(accounts).hasSize(6).allMatch(Accounting::balances);
         long lines = Files.readAllLines(reports()).size();
         assertThat(accounts.stream().mapToLong(AccountingLine::read).sum()).isEqualTo(lines);
         List<RejectedLine> rejected = read(first, "rejected.ndjson", RejectedLine.class);

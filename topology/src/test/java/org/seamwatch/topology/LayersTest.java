@@ -21,6 +21,7 @@ class LayersTest {
                     "org.seamwatch.processors..",
                     "org.seamwatch.schemas..",
                     "java..",
+                    "com.fasterxml.jackson.core..",
                     "org.apache.kafka..",
                     "org.rocksdb..",
                     "org.jspecify..",
