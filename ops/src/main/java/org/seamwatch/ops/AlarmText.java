@@ -1,6 +1,9 @@
 package org.seamwatch.ops;
 
+import java.math.BigDecimal;
+import java.math.RoundingMode;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Locale;
 import java.util.stream.Collectors;
@@ -14,6 +17,7 @@ import org.seamwatch.schemas.record.Evidence;
 import org.seamwatch.schemas.record.EvidenceChart;
 import org.seamwatch.schemas.record.Limits;
 import org.seamwatch.schemas.record.Quality;
+import org.seamwatch.schemas.record.Verdict;
 
 /**
  * A change of an alarm as a short block for people: what, where, since when, how sure, how good the data are, what to do
@@ -45,6 +49,7 @@ final class AlarmText {
         text.data();
         text.response(alarm.response());
         text.row("next", next(alarm.change()));
+        text.howToAnswer();
         text.row("caution", alarm.evidence().caution());
         return String.join(System.lineSeparator(), text.lines) + System.lineSeparator();
     }
@@ -87,7 +92,8 @@ final class AlarmText {
         row(
                 "",
                 "in " + evidence.period().from() + " to " + evidence.period().to() + " by "
-                        + evidence.period().dateBasis() + " date");
+                        + evidence.period().dateBasis() + " date; expected: by usual share of all cases of these days;"
+                        + " named because they are high");
     }
 
     private static String place(ClusterRegion region) {
@@ -107,7 +113,8 @@ final class AlarmText {
         List<String> begun = new ArrayList<>();
         for (EvidenceChart chart : evidence.charts()) {
             if (chart.began() != null) {
-                begun.add("about " + chart.began() + " by the " + chart.chart() + " chart of " + chart.statistic());
+                begun.add("the " + chart.chart() + " chart of " + chart.statistic()
+                        + " has been above its centre since " + chart.began());
             }
         }
         row("since", begun.isEmpty() ? "not known" : String.join("; ", begun));
@@ -119,7 +126,7 @@ final class AlarmText {
                     "how sure",
                     String.format(
                             Locale.ROOT,
-                            "%s of %s at %.2f, action limit %s",
+                            "the %s chart of %s stands at %.2f, its action limit is %s",
                             chart.chart(),
                             chart.statistic(),
                             chart.value(),
@@ -129,12 +136,20 @@ final class AlarmText {
                 "",
                 String.format(
                         Locale.ROOT,
-                        "such limits alarm for nothing about %.2f times a year in this series (desk: %s)",
-                        evidence.method().seriesFalseAlarmsPerYear(),
-                        evidence.method().deskFalseAlarmsPerYear()));
+                        "limits are set so that this series alarms for nothing about %s times a year (the desk: %s)",
+                        number(evidence.method().seriesFalseAlarmsPerYear()),
+                        number(evidence.method().deskFalseAlarmsPerYear())));
         if (evidence.method().youngLearning()) {
             row("", "learning is young: only " + evidence.method().learningDays() + " days have taught");
         }
+    }
+
+    /** At most two decimals. */
+    private static String number(double value) {
+        return BigDecimal.valueOf(value)
+                .setScale(2, RoundingMode.HALF_UP)
+                .stripTrailingZeros()
+                .toPlainString();
     }
 
     static String limits(Limits limits) {
@@ -169,8 +184,11 @@ final class AlarmText {
     }
 
     private static String word(AlarmResponse response) {
-        return response.verdict().name().toLowerCase(Locale.ROOT).replace('_', '-') + " by " + response.by() + " at "
-                + response.at();
+        return word(response.verdict()) + " by " + response.by() + " at " + response.at();
+    }
+
+    private static String word(Verdict verdict) {
+        return verdict.name().toLowerCase(Locale.ROOT).replace('_', '-');
     }
 
     private static String next(Change change) {
@@ -183,6 +201,16 @@ final class AlarmText {
             case ENDED -> "being inside the limits does not say that it is over: answer what it was";
             case WITHDRAWN -> "revised reports no longer show the signal: tell those who were told of it";
         };
+    }
+
+    private void howToAnswer() {
+        if (alarm.change() == Change.RAISED
+                || alarm.change() == Change.STRENGTHENED
+                || alarm.change() == Change.OVERDUE) {
+            String verdicts =
+                    Arrays.stream(Verdict.values()).map(AlarmText::word).collect(Collectors.joining(", "));
+            row("", "answers go to alarm-responses, key " + alarm.series() + ", with a verdict: " + verdicts);
+        }
     }
 
     private void row(String label, String text) {

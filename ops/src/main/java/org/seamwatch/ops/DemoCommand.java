@@ -1,17 +1,16 @@
 package org.seamwatch.ops;
 
-import java.io.IOException;
-import java.io.UncheckedIOException;
-import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
+import java.util.List;
 import java.util.concurrent.Callable;
-import org.apache.kafka.common.errors.InterruptException;
 import org.jspecify.annotations.Nullable;
 import org.seamwatch.fixtures.scenario.Scenario;
 import org.seamwatch.fixtures.scenario.ScenarioOptions;
 import org.seamwatch.fixtures.scenario.ScenarioWriter;
+import org.seamwatch.schemas.record.AccountingLine;
+import org.seamwatch.schemas.record.AlarmChange;
 import org.seamwatch.topology.replay.ResultFiles;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Option;
@@ -21,8 +20,8 @@ import picocli.CommandLine.Option;
         name = "demo",
         description = {
             "Runs the live service on an embedded Kafka broker, on the made-up feed of Northmarch.",
-            "The history runs through at full speed, then the last 60 days play at one day every",
-            "two seconds, then it stays up until Ctrl-C."
+            "The history runs through at full speed, then the last 60 days play at one day",
+            "every two seconds, then it stays up until Ctrl-C."
         })
 final class DemoCommand implements Callable<Integer> {
 
@@ -39,8 +38,8 @@ final class DemoCommand implements Callable<Integer> {
             names = "--out",
             paramLabel = "DIR",
             description = {
-                "folder for plan, geography, planted outbreaks, input log and results;",
-                "by default a temporary one, results only with --once"
+                "folder to keep plan, geography and planted outbreaks in, and with --once the",
+                "input log and all results; by default nothing is kept"
             })
     private @Nullable Path out;
 
@@ -57,13 +56,22 @@ final class DemoCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        Path folder = folder();
+        if (out != null) {
+            ResultFiles.prepare(out);
+            return demo(out);
+        }
+        try (DemoState folder = DemoState.make("seamwatch-demo")) {
+            return demo(folder.folder());
+        }
+    }
+
+    private int demo(Path folder) throws Exception {
         console.say("Northmarch is made up, and so is everything in it.");
         Scenario scenario = Scenario.of(ScenarioOptions.defaults().withSeed(seed));
         new ScenarioWriter(scenario).write(folder);
         Plans plans = Plans.read(folder.resolve(ScenarioWriter.PLAN));
-        try (DemoStop stop = new DemoStop(console, Thread.currentThread());
-                DemoRun run = DemoRun.start(console, scenario, plans)) {
+        try (DemoStop stop = new DemoStop(console);
+                DemoRun run = DemoRun.start(console, scenario, plans, stop)) {
             try {
                 if (once) {
                     run.everything();
@@ -73,10 +81,10 @@ final class DemoCommand implements Callable<Integer> {
                     run.history(playFrom.atStartOfDay(ZoneOffset.UTC).toInstant());
                     run.play();
                     stop.allPlayed();
+                    planted(scenario, run, run.results().alarms());
                     run.stayUp();
                 }
-            } catch (InterruptedException | InterruptException e) {
-                boolean unused = Thread.interrupted();
+            } catch (InterruptedException e) {
                 console.say("The demo ends.");
                 return stop.code();
             }
@@ -84,24 +92,19 @@ final class DemoCommand implements Callable<Integer> {
         return Failures.DONE;
     }
 
-    private Path folder() {
-        if (out != null) {
-            ResultFiles.prepare(out);
-            return out;
-        }
-        try {
-            return Files.createTempDirectory("seamwatch-demo");
-        } catch (IOException e) {
-            throw new UncheckedIOException("no temporary folder can be made", e);
-        }
-    }
-
     private void results(DemoRun run, Scenario scenario, Path folder) {
         DemoResults results = run.results();
         results.alarms().forEach(alarm -> console.say(AlarmText.of(alarm)));
-        PlantedText.of(scenario, results.alarms()).forEach(console::say);
-        results.write(folder, run.accounts());
+        planted(scenario, run, results.alarms());
         console.say("");
-        console.say("Plan, geography, planted outbreaks, input log and results are in " + folder);
+        List<AccountingLine> accounts = run.accounts();
+        if (out != null) {
+            results.write(folder, accounts);
+            console.say("Plan, geography, planted outbreaks, input log and results are in " + folder);
+        }
+    }
+
+    private void planted(Scenario scenario, DemoRun run, List<AlarmChange> alarms) {
+        PlantedText.of(scenario, run.falseAlarmsPerYear(), alarms).forEach(console::say);
     }
 }

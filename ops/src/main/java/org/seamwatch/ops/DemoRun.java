@@ -47,11 +47,14 @@ final class DemoRun implements AutoCloseable {
     private final DemoLog log;
     private final Drain drain;
     private final DemoState state;
+    private final DemoStop stop;
 
-    private DemoRun(Console console, Scenario scenario, Plans plans, EmbeddedBroker broker, DemoState state) {
+    private DemoRun(
+            Console console, Scenario scenario, Plans plans, EmbeddedBroker broker, DemoState state, DemoStop stop) {
         this.console = console;
         this.broker = broker;
         this.state = state;
+        this.stop = stop;
         this.plan = here(plans.read().plan(), broker.bootstrapServers(), state);
         this.log = new DemoLog(scenario, plan.topics());
         this.topics = TopicTool.of(broker.bootstrapServers(), Map.of("linger.ms", 20, "batch.size", 256 * 1024));
@@ -66,11 +69,11 @@ final class DemoRun implements AutoCloseable {
     }
 
     /** Starts broker and service. */
-    static DemoRun start(Console console, Scenario scenario, Plans plans) {
-        DemoState state = DemoState.make();
+    static DemoRun start(Console console, Scenario scenario, Plans plans, DemoStop stop) {
+        DemoState state = DemoState.make("seamwatch-state");
         EmbeddedBroker broker = Brokers.embedded(BrokerSettings.defaults());
         console.say("A Kafka broker runs in this process at " + broker.bootstrapServers() + ".");
-        DemoRun run = new DemoRun(console, scenario, plans, broker, state);
+        DemoRun run = new DemoRun(console, scenario, plans, broker, state, stop);
         run.service.start();
         return run;
     }
@@ -102,8 +105,9 @@ final class DemoRun implements AutoCloseable {
             for (Instant to = log.start().plus(LOADED_AT_ONCE); sent < log.size(); to = to.plus(LOADED_AT_ONCE)) {
                 Instant until = to.isBefore(end) ? to : end;
                 sent += topics.send(log.before(until)).size();
-                progress.now(drain.read(), drain.read());
-                if (!until.isBefore(end)) {
+                long read = drain.read();
+                progress.now(read, read);
+                if (!until.isBefore(end) || stop.isAsked()) {
                     break;
                 }
             }
@@ -113,14 +117,20 @@ final class DemoRun implements AutoCloseable {
 
     private void awaitAll(Progress progress) throws InterruptedException {
         long deadline = System.nanoTime() + MOST_PATIENCE.toNanos();
-        for (long read = drain.read(); !drain.isEmpty(); read = drain.read()) {
-            progress.now(read, read);
-            if (service.failures() > 0 || System.nanoTime() - deadline > 0) {
-                throw new CommandFailure(
-                        "the service did not read the whole feed, " + service.failures() + " of its threads have ended",
-                        null);
+        try {
+            for (stop.pause(Duration.ZERO); !drain.isEmpty(); stop.pause(LOOK)) {
+                long read = drain.read();
+                progress.now(read, read);
+                if (service.failures() > 0 || System.nanoTime() - deadline > 0) {
+                    throw new CommandFailure(
+                            "the service did not read the whole feed, " + service.failures()
+                                    + " of its threads have ended",
+                            null);
+                }
             }
-            Thread.sleep(LOOK.toMillis());
+        } catch (InterruptedException e) {
+            progress.stopped();
+            throw e;
         }
     }
 
@@ -144,7 +154,7 @@ final class DemoRun implements AutoCloseable {
         console.say("");
         console.say("The feed is at its end. The service stays up, with its topics at " + broker.bootstrapServers()
                 + "; Ctrl-C ends the demo.");
-        Thread.sleep(Long.MAX_VALUE);
+        stop.await();
     }
 
     private KafkaConsumer<byte[], byte[]> alarms() {
@@ -155,7 +165,8 @@ final class DemoRun implements AutoCloseable {
         consumer.assign(consumer.partitionsFor(plan.topics().prefix() + Topics.ALARMS).stream()
                 .map(p -> new TopicPartition(p.topic(), p.partition()))
                 .toList());
-        consumer.seekToBeginning(consumer.assignment());
+        consumer.seekToEnd(consumer.assignment());
+        consumer.assignment().forEach(consumer::position);
         return consumer;
     }
 
@@ -165,10 +176,13 @@ final class DemoRun implements AutoCloseable {
             for (ConsumerRecord<byte[], byte[]> record : alarms.poll(LOOK)) {
                 console.say(AlarmText.of(Json.read(record.value(), AlarmChange.class)));
             }
-            if (Thread.interrupted()) {
-                throw new InterruptedException();
-            }
+            stop.pause(Duration.ZERO);
         }
+    }
+
+    /** What the plan accepts for the whole desk. */
+    double falseAlarmsPerYear() {
+        return plan.deskFalseAlarmsPerYear();
     }
 
     /** What the run has left in its topics. */

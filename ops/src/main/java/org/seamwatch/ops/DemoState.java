@@ -9,15 +9,15 @@ import java.util.List;
 import java.util.stream.Stream;
 
 /**
- * A folder for the stores of a demo, deleted with it.
+ * A folder for what a demo needs while it runs, deleted with it.
  *
  * @param folder the folder
  */
 record DemoState(Path folder) implements AutoCloseable {
 
-    static DemoState make() {
+    static DemoState make(String name) {
         try {
-            return new DemoState(Files.createTempDirectory("seamwatch-state"));
+            return new DemoState(Files.createTempDirectory(name));
         } catch (IOException e) {
             throw new UncheckedIOException("no temporary folder can be made", e);
         }

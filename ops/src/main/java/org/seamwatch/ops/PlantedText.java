@@ -30,14 +30,19 @@ final class PlantedText {
 
     private static final int DAYS_AFTER = 7;
     private static final int NAMED = 3;
+    private static final double DAYS_PER_YEAR = 365.25;
     private static final DateTimeFormatter DAY = DateTimeFormatter.ofPattern("d MMM yyyy", Locale.ENGLISH);
 
+    private final Scenario scenario;
+    private final long accepted;
     private final Map<String, String> names = new HashMap<>();
     private final List<Outbreak> outbreaks;
     private final Map<String, List<AlarmChange>> alarms;
     private final List<String> lines = new ArrayList<>();
 
-    private PlantedText(Scenario scenario, List<AlarmChange> changes) {
+    private PlantedText(Scenario scenario, double falseAlarmsPerYear, List<AlarmChange> changes) {
+        this.scenario = scenario;
+        this.accepted = Math.round(falseAlarmsPerYear * scenario.options().days() / DAYS_PER_YEAR);
         scenario.territory().districts().forEach(d -> names.put(d.id(), d.name()));
         outbreaks = scenario.outbreaks();
         alarms = changes.stream()
@@ -47,10 +52,11 @@ final class PlantedText {
     /**
      * The comparison, line by line.
      *
+     * @param falseAlarmsPerYear what the plan accepts for the whole desk
      * @param changes all changes of alarms, each alarm's in order
      */
-    static List<String> of(Scenario scenario, List<AlarmChange> changes) {
-        PlantedText text = new PlantedText(scenario, changes);
+    static List<String> of(Scenario scenario, double falseAlarmsPerYear, List<AlarmChange> changes) {
+        PlantedText text = new PlantedText(scenario, falseAlarmsPerYear, changes);
         text.write();
         return text.lines;
     }
@@ -65,7 +71,11 @@ final class PlantedText {
                 .filter(changes -> !used.contains(changes.get(0).alarm()))
                 .toList();
         lines.add("");
-        lines.add(others.isEmpty() ? "It alarmed on nothing else." : "What else it alarmed on");
+        lines.add(
+                others.isEmpty()
+                        ? "It alarmed on nothing else."
+                        : "What else it alarmed on: " + others.size() + " in "
+                                + scenario.options().days() + " days, where the plan accepts about " + accepted);
         others.forEach(changes -> lines.add("  " + told(changes)));
     }
 

@@ -26,6 +26,7 @@ final class Progress implements AutoCloseable {
     private long asked;
     private long units;
     private boolean drawn;
+    private boolean stopped;
 
     Progress(Console console, String what, String unit, long total) {
         this(console, what, unit, total, System::nanoTime);
@@ -95,6 +96,11 @@ final class Progress implements AutoCloseable {
         return String.format(Locale.ROOT, "%,d %s, %,.0f a second", units, unit, units / seconds);
     }
 
+    /** The work ends before it is done. */
+    void stopped() {
+        stopped = true;
+    }
+
     /** Takes the bar away; work that took longer leaves one line behind. */
     @Override
     public void close() {
@@ -105,7 +111,12 @@ final class Progress implements AutoCloseable {
         if (now - start >= QUIET) {
             console.err()
                     .println(String.format(
-                            Locale.ROOT, "%s  done in %.1f s: %s", what, (double) (now - start) / NANOS, rate(now)));
+                            Locale.ROOT,
+                            "%s  %s %.1f s: %s",
+                            what,
+                            stopped ? "stopped after" : "done in",
+                            (double) (now - start) / NANOS,
+                            rate(now)));
         }
         console.err().flush();
     }

@@ -39,6 +39,9 @@ import picocli.CommandLine.Option;
         })
 final class ReplayCommand implements Callable<Integer> {
 
+    /** One rejected in so many is worth a warning. */
+    private static final int MANY = 10;
+
     private final Console console;
 
     @Mixin
@@ -166,6 +169,13 @@ final class ReplayCommand implements Callable<Integer> {
                 sums[4],
                 sums[5]));
         reasons.forEach((reason, n) -> console.say(String.format(Locale.ROOT, "  rejected as %s: %,d", reason, n)));
+        if (sums[4] * MANY > sums[0] - sums[5]) {
+            console.warn(String.format(
+                    Locale.ROOT,
+                    "%,d of %,d reports were rejected: are plan and reports of the same territory and conditions?",
+                    sums[4],
+                    sums[0] - sums[5]));
+        }
         if (notFed > 0) {
             console.say(String.format(Locale.ROOT, "  %,d more lie beyond --until", notFed));
         }

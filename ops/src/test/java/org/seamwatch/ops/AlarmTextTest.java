@@ -72,15 +72,20 @@ class AlarmTextTest {
                         "  what      Influenza, Northmarch: 71 cases.",
                         "  where     1,071 cases, 12.5 expected: Alder (NM-014) 40, 6.5 expected, 80.2 per 100,000; Birch"
                                 + " (NM-015) 31, 6.0 expected; and 3 more",
-                        "            in 2024-06-10 to 2024-06-16 by report date",
-                        "  since     about 2024-06-12 by the ewma chart of moran",
-                        "  how sure  ewma of moran at 1.02, action limit 0.930",
-                        "            such limits alarm for nothing about 3.00 times a year in this series (desk: 6.0)",
+                        "            in 2024-06-10 to 2024-06-16 by report date; expected: by usual share of all cases of"
+                                + " these days; named because they are high",
+                        "  since     the ewma chart of moran has been above its centre since 2024-06-12",
+                        "  how sure  the ewma chart of moran stands at 1.02, its action limit is 0.930",
+                        "            limits are set so that this series alarms for nothing about 3 times a year (the desk:"
+                                + " 6)",
                         "            learning is young: only 57 days have taught",
                         "  data      1,412 cases, 30 of them preliminary, -2 net after their day had closed; first view;"
                                 + " regions not judged: 3",
                         "  next      look at the reports of these places, ask their sources whether anything changed in"
                                 + " testing or reporting, then answer the alarm",
+                        "            answers go to alarm-responses, key northmarch/influenza, with a verdict: acknowledged,"
+                                + " under-investigation, outbreak, known-event, no-outbreak, data-fault,"
+                                + " baseline-changed",
                         "  caution   " + CAUTION);
     }
 

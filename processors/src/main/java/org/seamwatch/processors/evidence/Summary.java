@@ -36,21 +36,18 @@ final class Summary {
     String of(AlarmMove move, EvidenceInput in, List<Cluster> clusters, List<EvidenceChart> charts, Quality quality) {
         AlarmState alarm = move.alarm();
         if (move.change() == Change.ENDED) {
-            return title + "back inside its limits on " + in.day().format(FULL_DAY) + ", after signals from "
-                    + alarm.start().format(DAY) + " to " + alarm.lastSignal().format(DAY)
-                    + "; that does not say that anything is over; " + NOT_CONFIRMED;
+            return title + "back inside its limits on " + in.day().format(FULL_DAY) + ", after signals "
+                    + signals(alarm) + "; that does not say that anything is over; " + NOT_CONFIRMED;
         }
         if (move.change() == Change.WITHDRAWN && in.planChanged()) {
             return title
-                    + "withdrawn; the plan of this series has changed and learning has begun afresh, so the signals"
-                    + " from " + alarm.start().format(DAY) + " to "
-                    + alarm.lastSignal().format(DAY)
+                    + "withdrawn; the plan of this series has changed and learning has begun afresh, so the signals "
+                    + signals(alarm)
                     + " are not followed any further; that does not say that anything is over; what was raised was "
                     + NOT_CONFIRMED;
         }
         if (move.change() == Change.WITHDRAWN) {
-            return title + "withdrawn; with the reports as they now stand no signal is left between "
-                    + alarm.start().format(DAY) + " and " + alarm.lastSignal().format(DAY)
+            return title + "withdrawn; with the reports as they now stand no signal is left " + signals(alarm)
                     + "; silence is not safety; what was raised was " + NOT_CONFIRMED;
         }
         String open = move.change() == Change.OVERDUE
@@ -61,6 +58,13 @@ final class Summary {
                 + view(quality) + "; " + NOT_CONFIRMED;
     }
 
+    private static String signals(AlarmState alarm) {
+        return alarm.start().equals(alarm.lastSignal())
+                ? "on " + alarm.start().format(DAY)
+                : "from " + alarm.start().format(DAY) + " to "
+                        + alarm.lastSignal().format(DAY);
+    }
+
     private static String places(List<Cluster> clusters, Quality quality) {
         if (clusters.isEmpty()) {
             return Wording.count(quality.cases(), "case") + ", no group of regions far above its usual share,";
@@ -68,8 +72,8 @@ final class Summary {
         Cluster first = clusters.get(0);
         List<String> names =
                 first.regions().stream().limit(NAMED).map(ClusterRegion::name).toList();
-        return Wording.count(first.cases(), "case") + " (" + Wording.number(first.expected()) + " expected) in "
-                + Wording.list(names, first.regionCount() - names.size());
+        return Wording.count(first.cases(), "case") + " (" + Wording.number(first.expected())
+                + " expected by usual share) in " + Wording.list(names, first.regionCount() - names.size());
     }
 
     private static String since(List<EvidenceChart> charts) {
@@ -79,12 +83,10 @@ final class Summary {
         }
         LocalDate began = beyond.began();
         Double limit = beyond.action().upper();
-        return ", " + Wording.statistic(beyond.statistic()) + " unusual for this series"
-                + (began == null ? "" : " since about " + began.format(DAY))
-                + (limit == null
-                        ? ""
-                        : " (chart at " + Wording.number(beyond.value()) + ", action limit " + Wording.number(limit)
-                                + ")");
+        return ", " + Wording.statistic(beyond.statistic()) + " unusual for this series (chart at "
+                + Wording.hundredths(beyond.value())
+                + (limit == null ? "" : ", action limit " + Wording.hundredths(limit))
+                + (began == null ? "" : ", above its centre since " + began.format(DAY)) + ")";
     }
 
     private static @Nullable EvidenceChart strongest(List<EvidenceChart> charts) {

@@ -25,6 +25,11 @@ final class Wording {
         return n == 1 ? "once" : n + " times";
     }
 
+    /** Always two decimals: values to be compared. */
+    static String hundredths(double value) {
+        return String.format(Locale.ROOT, "%.2f", value);
+    }
+
     /** At most two decimals, none from 10 on. */
     static String number(double value) {
         String pattern = StrictMath.abs(value) >= 10 ? "%.0f" : "%.2f";

@@ -147,9 +147,9 @@ class EvidenceMakerTest {
 
         assertThat(evidence.summary())
                 .isEqualTo(
-                        "Influenza, Gridland: 65 cases (19 expected) in Square 0 0, Square 0 1, Square 1 0 and 1 more"
+                        "Influenza, Gridland: 65 cases (19 expected by usual share) in Square 0 0, Square 0 1, Square 1 0 and 1 more"
                                 + " in the 7 days to Sunday 16 June 2024 by event date, clustering (Moran's I) unusual for this"
-                                + " series since about 12 June (chart at 1.02, action limit 0.93); first view, 8 % preliminary;"
+                                + " series (chart at 1.02, action limit 0.93, above its centre since 12 June); first view, 8 % preliminary;"
                                 + " a statistical signal, not a confirmed outbreak.");
     }
 
@@ -160,8 +160,8 @@ class EvidenceMakerTest {
 
         assertThat(evidence.summary())
                 .isEqualTo("Influenza, Gridland: 50 cases, no group of regions far above its usual share, in the 7 days"
-                        + " to Sunday 16 June 2024 by event date, clustering (Moran's I) unusual for this series since"
-                        + " about 12 June (chart at 1.02, action limit 0.93); revised once; a statistical signal, not a"
+                        + " to Sunday 16 June 2024 by event date, clustering (Moran's I) unusual for this series"
+                        + " (chart at 1.02, action limit 0.93, above its centre since 12 June); revised once; a statistical signal, not a"
                         + " confirmed outbreak.");
     }
 
@@ -186,10 +186,9 @@ class EvidenceMakerTest {
                 make(watch, move(Change.WITHDRAWN, DAY.minusDays(2), DAY), DAY, cases(2, Map.of()), even(), 2, 0);
 
         assertThat(evidence.summary())
-                .isEqualTo(
-                        "Influenza, Gridland: withdrawn; with the reports as they now stand no signal is left between"
-                                + " 14 June and 16 June; silence is not safety; what was raised was a statistical signal, not a"
-                                + " confirmed outbreak.");
+                .isEqualTo("Influenza, Gridland: withdrawn; with the reports as they now stand no signal is left from"
+                        + " 14 June to 16 June; silence is not safety; what was raised was a statistical signal, not a"
+                        + " confirmed outbreak.");
     }
 
     @Test
@@ -200,7 +199,7 @@ class EvidenceMakerTest {
 
         assertThat(evidence.summary())
                 .startsWith(
-                        "Influenza, Gridland: open for 56 days without a verdict; 20 cases (2.72 expected) in Square"
+                        "Influenza, Gridland: open for 56 days without a verdict; 20 cases (2.72 expected by usual share) in Square"
                                 + " 0 0 in the 7 days to Sunday 16 June 2024 by event date");
     }
 

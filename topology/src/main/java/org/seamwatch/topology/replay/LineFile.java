@@ -48,7 +48,9 @@ public final class LineFile implements Closeable {
         try {
             Counted raw = new Counted(Files.newInputStream(file));
             try {
-                return new LineFile(file, raw, new BufferedInputStream(unpacked(file, raw), BUFFER));
+                InputStream in = new BufferedInputStream(unpacked(file, raw), BUFFER);
+                skipByteOrderMark(in);
+                return new LineFile(file, raw, in);
             } catch (IOException e) {
                 raw.close();
                 throw e;
@@ -66,6 +68,14 @@ public final class LineFile implements Closeable {
         if (Files.isDirectory(file) || !Files.isReadable(file)) {
             throw new InputException(
                     file + ": " + (Files.isDirectory(file) ? "is a folder, must be a file" : "cannot be read"));
+        }
+    }
+
+    /** Some editors begin UTF-8 with a mark, which is no part of the first line. */
+    private static void skipByteOrderMark(InputStream in) throws IOException {
+        in.mark(3);
+        if (in.read() != 0xEF || in.read() != 0xBB || in.read() != 0xBF) {
+            in.reset();
         }
     }
 

@@ -176,6 +176,15 @@ class ReplayFilesTest {
     }
 
     @Test
+    void shouldPassOverAByteOrderMark() throws IOException {
+        String[] lines = {report("a", "R0", "2024-01-02T10:00:00Z"), report("b", "R0", "2024-01-02T11:00:00Z")};
+        Path marked = file("marked.ndjson", "\uFEFF" + lines[0], lines[1]);
+
+        assertThat(feed(marked).lines())
+                .isEqualTo(feed(file("plain.ndjson", lines)).lines());
+    }
+
+    @Test
     void shouldReadPackedFilesAndFilesInTheirOrder() throws IOException {
         String first = report("a", "R0", "2024-03-01T10:00:00Z");
         String second = report("b", "R1", "2024-03-02T10:00:00Z");
