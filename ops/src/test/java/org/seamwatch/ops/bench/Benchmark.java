@@ -29,6 +29,10 @@ public final class Benchmark {
 
     /** Runs it; see {@link BenchOptions#USAGE}. */
     public static void main(String[] args) throws IOException, InterruptedException {
+        if (List.of(args).contains("--help")) {
+            System.out.print(BenchOptions.USAGE);
+            return;
+        }
         BenchOptions options;
         try {
             options = BenchOptions.parse(args);
