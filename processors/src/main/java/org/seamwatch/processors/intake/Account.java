@@ -2,6 +2,7 @@ package org.seamwatch.processors.intake;
 
 import java.util.SortedMap;
 import java.util.TreeMap;
+import org.jspecify.annotations.Nullable;
 import org.seamwatch.processors.state.ByteReader;
 import org.seamwatch.processors.state.ByteWriter;
 
@@ -22,6 +23,7 @@ public final class Account {
     private long firstTimestamp = -1;
     private long time = -1;
     private final SortedMap<String, Long> reasons = new TreeMap<>();
+    private byte @Nullable [] reasonsPart;
 
     Account() {}
 
@@ -46,9 +48,19 @@ public final class Account {
     byte[] row() {
         ByteWriter out = new ByteWriter(VERSION).number(read).number(accepted).number(duplicate);
         out.number(superseded).number(rejected).number(control);
-        out.number(firstTimestamp).number(time).number(reasons.size());
-        reasons.forEach((reason, count) -> out.text(reason).number(count));
-        return out.bytes();
+        return out.number(firstTimestamp).number(time).raw(reasonsPart()).bytes();
+    }
+
+    /** The end of the row, which few records change. */
+    private byte[] reasonsPart() {
+        byte[] part = reasonsPart;
+        if (part == null) {
+            ByteWriter out = ByteWriter.part().number(reasons.size());
+            reasons.forEach((reason, count) -> out.text(reason).number(count));
+            part = out.bytes();
+            reasonsPart = part;
+        }
+        return part;
     }
 
     /** Counts a record and moves time on. */
@@ -79,6 +91,7 @@ public final class Account {
     void reject(String reason) {
         rejected++;
         reasons.merge(reason, 1L, Long::sum);
+        reasonsPart = null;
     }
 
     /** Records read. */

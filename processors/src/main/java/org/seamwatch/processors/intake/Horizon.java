@@ -1,6 +1,5 @@
 package org.seamwatch.processors.intake;
 
-import java.time.Instant;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
@@ -16,6 +15,7 @@ final class Horizon {
     private static final int EXTRA_DAYS = 30;
 
     private final Watch watch;
+    private final LocalDays days = new LocalDays();
 
     Horizon(Watch watch) {
         this.watch = watch;
@@ -31,18 +31,17 @@ final class Horizon {
             SeriesSpec spec = watch.series().get(c.series());
             longest = spec == null ? longest : Math.max(longest, spec.plan().reviseForDays());
         }
-        Instant now = Instant.ofEpochMilli(time);
         List<Contribution> within = new ArrayList<>(contributions.size());
         for (Contribution c : contributions) {
             SeriesSpec spec = watch.series().get(c.series());
-            if (spec != null && !c.day().isBefore(oldest(now, spec, longest))) {
+            if (spec != null && !c.day().isBefore(oldest(time, spec, longest))) {
                 within.add(c);
             }
         }
         return within;
     }
 
-    private static LocalDate oldest(Instant now, SeriesSpec spec, int reviseForDays) {
-        return now.atZone(spec.zone()).toLocalDate().minusDays(reviseForDays + (long) EXTRA_DAYS);
+    private LocalDate oldest(long time, SeriesSpec spec, int reviseForDays) {
+        return days.at(time, spec.zone()).minusDays(reviseForDays + (long) EXTRA_DAYS);
     }
 }

@@ -24,6 +24,7 @@ final class InputPartition {
     private final InputSizes sizes;
     private final Shelf accounts;
     private final IntakeOutput out;
+    private final String key;
     private final Account account;
 
     InputPartition(String topic, int partition, InputSizes sizes, Shelf accounts, IntakeOutput out) {
@@ -32,12 +33,9 @@ final class InputPartition {
         this.sizes = sizes;
         this.accounts = accounts;
         this.out = out;
-        byte @Nullable [] row = accounts.get(key(topic, partition));
+        this.key = topic + "|" + partition;
+        byte @Nullable [] row = accounts.get(key);
         this.account = row == null ? new Account() : Account.from(row);
-    }
-
-    static String key(String topic, int partition) {
-        return topic + "|" + partition;
     }
 
     /** Makes something of a record, or says why it cannot. */
@@ -58,7 +56,7 @@ final class InputPartition {
                 reject(record, why);
             }
         }
-        accounts.put(key(topic, partition), account.row());
+        accounts.put(key, account.row());
     }
 
     /** Moves time on to a record; where that enters a new hour, ends the hour before and sends the watermark. */

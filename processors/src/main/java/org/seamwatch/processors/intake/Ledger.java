@@ -34,8 +34,7 @@ final class Ledger {
     /** Removes what lies beyond the horizon. */
     void sweep(long time) {
         rows.visit((reportId, row) -> {
-            if (horizon.within(LedgerEntry.from(reportId, row).contributions(), time)
-                    .isEmpty()) {
+            if (horizon.within(LedgerEntry.contributions(row), time).isEmpty()) {
                 rows.remove(reportId);
             }
         });

@@ -66,10 +66,7 @@ record LedgerEntry(CaseReport report, String region, List<Contribution> contribu
         String reportDate = in.textOrNull();
         int count = in.integer();
         String region = in.text();
-        List<Contribution> contributions = new ArrayList<>();
-        for (int n = in.integer(); n > 0; n--) {
-            contributions.add(new Contribution(in.text(), LocalDate.ofEpochDay(in.number())));
-        }
+        List<Contribution> contributions = contributions(in);
         CaseReport report = new CaseReport(
                 1,
                 reportId,
@@ -84,6 +81,33 @@ record LedgerEntry(CaseReport report, String region, List<Contribution> contribu
                 Instant.EPOCH,
                 count);
         return new LedgerEntry(report, region, contributions);
+    }
+
+    /** The contributions of a row, without reading the rest. */
+    static List<Contribution> contributions(byte[] row) {
+        ByteReader in = new ByteReader(row, VERSION);
+        in.skipText();
+        in.number();
+        in.skipText();
+        in.skipText();
+        if (!in.skipText()) {
+            in.real();
+            in.real();
+        }
+        in.number();
+        in.skipText();
+        in.number();
+        in.skipText();
+        return contributions(in);
+    }
+
+    private static List<Contribution> contributions(ByteReader in) {
+        int size = in.integer();
+        List<Contribution> contributions = new ArrayList<>(size);
+        for (int n = size; n > 0; n--) {
+            contributions.add(new Contribution(in.text(), LocalDate.ofEpochDay(in.number())));
+        }
+        return contributions;
     }
 
     private static @Nullable String text(@Nullable LocalDate date) {

@@ -19,8 +19,8 @@ final class Placer {
     private static final Duration CLOCK_TOLERANCE = Duration.ofMinutes(10);
 
     private final Watch watch;
-
     private final Horizon horizon;
+    private final LocalDays days = new LocalDays();
 
     Placer(Watch watch, Horizon horizon) {
         this.watch = watch;
@@ -62,14 +62,14 @@ final class Placer {
         if (series.isEmpty()) {
             return unrouted(report, region);
         }
-        return placed(report, region, series, logTime, time);
+        return placed(report, region, series, timestamp, time);
     }
 
-    private Placing placed(CaseReport report, String region, List<SeriesSpec> series, Instant logTime, long time) {
+    private Placing placed(CaseReport report, String region, List<SeriesSpec> series, long timestamp, long time) {
         List<Contribution> contributions = new ArrayList<>(series.size());
         for (SeriesSpec spec : series) {
             LocalDate day = day(report, spec);
-            LocalDate latest = logTime.atZone(spec.zone()).toLocalDate().plusDays(1);
+            LocalDate latest = days.at(timestamp, spec.zone()).plusDays(1);
             if (day.isAfter(latest)) {
                 return no(
                         RejectReason.FUTURE_DAY,

@@ -16,7 +16,7 @@ import org.seamwatch.schemas.record.RejectReason;
 /** One partition of {@code case-reports}: each record's difference to what its report said before goes to its series. */
 public final class ReportIntake implements Intake {
 
-    private static final long SWEEP_HOURS = TimeUnit.DAYS.toHours(8);
+    private static final long SWEEP_HOURS = TimeUnit.DAYS.toHours(16);
 
     private final int partition;
     private final InputPartition input;
@@ -29,7 +29,7 @@ public final class ReportIntake implements Intake {
      * An intake over its stores.
      *
      * @param ledger rows by report id
-     * @param tally rows of the present hour
+     * @param tally rows of the present hour, and some of hours before
      * @param accounts rows by topic and partition
      */
     public ReportIntake(
@@ -38,7 +38,7 @@ public final class ReportIntake implements Intake {
         this.input = new InputPartition(Topics.CASE_REPORTS, partition, sizes, accounts, out);
         Horizon horizon = new Horizon(watch);
         this.ledger = new Ledger(ledger, horizon);
-        this.tally = new HourTally(tally);
+        this.tally = new HourTally(tally, input.hour());
         this.placer = new Placer(watch, horizon);
         this.out = out;
     }
@@ -107,9 +107,10 @@ public final class ReportIntake implements Intake {
     private void count(@Nullable LedgerEntry before, LedgerEntry now) {
         if (before != null) {
             before.contributions()
-                    .forEach(c -> tally.add(c, before.region(), before.cases().negated()));
+                    .forEach(c -> tally.add(
+                            input.hour(), c, before.region(), before.cases().negated()));
         }
-        now.contributions().forEach(c -> tally.add(c, now.region(), now.cases()));
+        now.contributions().forEach(c -> tally.add(input.hour(), c, now.region(), now.cases()));
         ledger.put(now);
         input.account().accept();
     }

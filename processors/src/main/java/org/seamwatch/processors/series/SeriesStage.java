@@ -5,7 +5,6 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.SortedMap;
 import java.util.TreeMap;
@@ -24,6 +23,8 @@ import org.seamwatch.processors.watch.Watch;
  * passed it, whatever the order in which things came.
  */
 public final class SeriesStage {
+
+    private static final int HOUR_DIGITS = 12;
 
     private static final Comparator<Response> RESPONSE_ORDER =
             Comparator.comparingInt(Response::partition).thenComparingLong(Response::offset);
@@ -70,7 +71,8 @@ public final class SeriesStage {
     }
 
     private static String prefix(long hour) {
-        return String.format(Locale.ROOT, "%012d|", hour);
+        String digits = Long.toString(hour);
+        return "0".repeat(HOUR_DIGITS - digits.length()) + digits + "|";
     }
 
     private void applyPassedHours() {

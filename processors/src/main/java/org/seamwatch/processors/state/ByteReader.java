@@ -51,6 +51,13 @@ public final class ByteReader {
         return value;
     }
 
+    /** Passes over a string or null; whether there was a string. */
+    public boolean skipText() {
+        int length = integer();
+        at += Math.max(0, length);
+        return length >= 0;
+    }
+
     public @Nullable String textOrNull() {
         int length = integer();
         if (length < 0) {

@@ -17,6 +17,21 @@ public final class ByteWriter {
         row[size++] = (byte) version;
     }
 
+    private ByteWriter() {}
+
+    /** Begins a part of a row, without a version. */
+    public static ByteWriter part() {
+        return new ByteWriter();
+    }
+
+    /** What another writer has written. */
+    public ByteWriter raw(byte[] part) {
+        room(part.length);
+        System.arraycopy(part, 0, row, size, part.length);
+        size += part.length;
+        return this;
+    }
+
     /** A number; small magnitudes of either sign take few bytes. */
     public ByteWriter number(long value) {
         room(LONGEST_NUMBER);
@@ -42,11 +57,7 @@ public final class ByteWriter {
     /** A string. */
     public ByteWriter text(String value) {
         byte[] utf8 = value.getBytes(StandardCharsets.UTF_8);
-        number(utf8.length);
-        room(utf8.length);
-        System.arraycopy(utf8, 0, row, size, utf8.length);
-        size += utf8.length;
-        return this;
+        return number(utf8.length).raw(utf8);
     }
 
     /** A string or null. */

@@ -6,6 +6,7 @@ import java.time.Instant;
 import java.time.LocalDate;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import java.util.stream.Stream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -24,6 +25,8 @@ import org.seamwatch.schemas.record.ReportStatus;
 class IntakeRowsTest {
 
     private static final LocalDate DAY = LocalDate.of(2024, 2, 3);
+    private static final Contribution TALLIED = new Contribution("gridland/influenza", DAY);
+    private static final String TALLY_KEY = "gridland/influenza|2024-02-03|R0000";
 
     static Stream<Arguments> entries() {
         CaseReport coded = new CaseReport(
@@ -71,6 +74,7 @@ class IntakeRowsTest {
     void shouldReadLedgerEntries(String name, LedgerEntry entry) {
         String id = entry.report().reportId();
         assertThat(LedgerEntry.from(id, entry.row())).isEqualTo(entry);
+        assertThat(LedgerEntry.contributions(entry.row())).isEqualTo(entry.contributions());
         OldRows.assertKept(name, entry.row());
         assertThat(LedgerEntry.from(id, OldRows.row(name))).isEqualTo(entry);
     }
@@ -96,21 +100,60 @@ class IntakeRowsTest {
     @Test
     void shouldReadTallies() {
         MemoryShelf shelf = new MemoryShelf();
-        HourTally tally = new HourTally(shelf);
-        Contribution where = new Contribution("gridland/influenza", DAY);
-        tally.add(where, "R0000", new Cases(300, -2));
-        String key = "gridland/influenza|2024-02-03|R0000";
-        byte[] row = shelf.get(key);
+        new HourTally(shelf, 7).add(7, TALLIED, "R0000", new Cases(300, -2));
+        byte[] row = shelf.get(TALLY_KEY);
         assertThat(row).isNotNull();
-        OldRows.assertKept("tally-1", row);
+        OldRows.assertKept("tally-2", row);
 
-        shelf.put(key, OldRows.row("tally-1"));
-        tally.add(where, "R0000", new Cases(1, 2));
+        shelf.put(TALLY_KEY, OldRows.row("tally-2"));
+        HourTally tally = new HourTally(shelf, 7);
+        tally.add(7, TALLIED, "R0000", new Cases(1, 2));
+        assertThat(ended(tally)).containsExactly(change(new Cases(301, 0)));
+    }
+
+    @Test
+    void shouldReadTalliesWithoutAnHourAndRemoveThem() {
+        MemoryShelf shelf = new MemoryShelf();
+        shelf.put(TALLY_KEY, OldRows.row("tally-1"));
+        HourTally tally = new HourTally(shelf, 7);
+        tally.add(7, TALLIED, "R0001", new Cases(1, 2));
+        assertThat(ended(tally))
+                .containsExactly(new SeriesMessage.DayChange(
+                        "gridland/influenza",
+                        7,
+                        3,
+                        DAY,
+                        new TreeMap<>(Map.of("R0000", new Cases(300, -2), "R0001", new Cases(1, 2)))));
+        assertThat(shelf.get(TALLY_KEY)).isNull();
+    }
+
+    @Test
+    void shouldTakeUpTheTalliesOfThePresentHourOnly() {
+        MemoryShelf shelf = new MemoryShelf();
+        shelf.put(TALLY_KEY, OldRows.row("tally-2"));
+        assertThat(ended(new HourTally(shelf, 8))).isEmpty();
+        assertThat(ended(new HourTally(shelf, 7))).containsExactly(change(new Cases(300, -2)));
+    }
+
+    @Test
+    void shouldSweepTalliesThatAreDaysOld() {
+        MemoryShelf shelf = new MemoryShelf();
+        shelf.put(TALLY_KEY, OldRows.row("tally-2"));
+        HourTally tally = new HourTally(shelf, 8);
+        IntakeBench out = new IntakeBench(TestDesk.small().watch());
+        tally.end(7 + 72, 3, out);
+        assertThat(shelf.size()).isOne();
+        tally.end(7 + 144, 3, out);
+        assertThat(shelf.size()).isZero();
+    }
+
+    private static List<Object> ended(HourTally tally) {
         IntakeBench out = new IntakeBench(TestDesk.small().watch());
         tally.end(7, 3, out);
-        assertThat(out.sent)
-                .containsExactly(new SeriesMessage.DayChange(
-                        "gridland/influenza", 7, 3, DAY, new java.util.TreeMap<>(Map.of("R0000", new Cases(301, 0)))));
-        assertThat(shelf.size()).isZero();
+        return List.copyOf(out.sent);
+    }
+
+    private static SeriesMessage.DayChange change(Cases cases) {
+        return new SeriesMessage.DayChange("gridland/influenza", 7, 3, DAY, new TreeMap<>(Map.of("R0000", cases)));
     }
 }

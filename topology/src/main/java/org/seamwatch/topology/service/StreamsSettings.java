@@ -14,7 +14,7 @@ import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.topology.LogTime;
 
 /** Engine properties: ours, then the plan's, then what the flow's guarantees rest on. */
-final class StreamsSettings {
+public final class StreamsSettings {
 
     /** A message to the series or a rejected record with key and value of 256 KiB each, with room to spare. */
     static final int MAX_REQUEST = 4 << 20;
@@ -23,6 +23,7 @@ final class StreamsSettings {
     private static final int HEARTBEAT_MS = 1_500;
     private static final int COMMIT_MS = 200;
     private static final int SEGMENT_BYTES = 64 << 20;
+    private static final int BATCH_BYTES = 128 << 10;
     private static final long CACHE_BYTES = 16L << 20;
 
     private static final Set<String> ENGINE_KEYS = StreamsConfig.configDef().names();
@@ -30,7 +31,8 @@ final class StreamsSettings {
 
     private StreamsSettings() {}
 
-    static Properties of(Plan plan) {
+    /** The properties of an engine that runs a plan. */
+    public static Properties of(Plan plan) {
         Properties p = new Properties();
         p.put(StreamsConfig.STATE_DIR_CONFIG, defaultStateDir().toString());
         p.put(StreamsConfig.COMMIT_INTERVAL_MS_CONFIG, COMMIT_MS);
@@ -43,6 +45,8 @@ final class StreamsSettings {
         p.put(StreamsConfig.consumerPrefix(ConsumerConfig.MAX_PARTITION_FETCH_BYTES_CONFIG), MAX_REQUEST);
         p.put(StreamsConfig.producerPrefix(ProducerConfig.MAX_REQUEST_SIZE_CONFIG), MAX_REQUEST);
         p.put(StreamsConfig.producerPrefix(ProducerConfig.COMPRESSION_TYPE_CONFIG), "lz4");
+        // A batch costs its compressor's start and a place in a request, whatever its size.
+        p.put(StreamsConfig.producerPrefix(ProducerConfig.BATCH_SIZE_CONFIG), BATCH_BYTES);
         p.put(StreamsConfig.ENABLE_METRICS_PUSH_CONFIG, false);
         p.putAll(plan.kafka());
         p.put(StreamsConfig.APPLICATION_ID_CONFIG, ApplicationId.of(plan));
