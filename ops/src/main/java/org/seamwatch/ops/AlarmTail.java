@@ -70,6 +70,10 @@ final class AlarmTail implements AutoCloseable {
     @Override
     public void close() {
         closed = true;
+        if (thread.getState() == Thread.State.NEW) {
+            consumer.close();
+            return;
+        }
         consumer.wakeup();
         try {
             thread.join(WAIT.multipliedBy(5).toMillis());

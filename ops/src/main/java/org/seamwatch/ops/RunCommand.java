@@ -84,8 +84,8 @@ final class RunCommand implements Callable<Integer> {
             if (service.isStateLeftOpen()) {
                 log.say("local state was not closed cleanly; it is rebuilt from Kafka");
             }
-            Future<?> unused = timer.scheduleWithFixedDelay(
-                    report::look, 0, RunReport.LOOK.toMillis(), TimeUnit.MILLISECONDS);
+            Future<?> unused =
+                    timer.scheduleWithFixedDelay(report::look, 0, RunReport.LOOK.toMillis(), TimeUnit.MILLISECONDS);
             if (service.awaitEnd()) {
                 throw new CommandFailure("the service stopped after a fault; the log names it", null);
             }

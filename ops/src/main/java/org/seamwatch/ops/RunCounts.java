@@ -68,9 +68,8 @@ record RunCounts(long accepted, long duplicate, long superseded, SortedMap<Strin
 
     /** How many were rejected, and why most of them. */
     String rejections() {
-        Map.Entry<String, Long> top = reasons.entrySet().stream()
-                .max(Map.Entry.comparingByValue())
-                .orElseThrow();
+        Map.Entry<String, Long> top =
+                reasons.entrySet().stream().max(Map.Entry.comparingByValue()).orElseThrow();
         return String.format(
                 Locale.ROOT,
                 "%,d of %,d reports were rejected, most often as %s (%,d)",

@@ -36,11 +36,11 @@ final class Answers {
             return value;
         } catch (ExecutionException e) {
             if (isSilence(e.getCause())) {
-                throw new NoBrokerException(plan, limit, doing);
+                throw new NoBrokerException(plan, doing);
             }
             throw new IllegalStateException(doing + " failed: " + e.getCause(), e.getCause());
         } catch (TimeoutException e) {
-            throw new NoBrokerException(plan, limit, doing);
+            throw new NoBrokerException(plan, doing);
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
             throw new IllegalStateException(doing + " was interrupted", e);

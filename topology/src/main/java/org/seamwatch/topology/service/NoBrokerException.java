@@ -7,8 +7,8 @@ public final class NoBrokerException extends RuntimeException {
 
     private static final long serialVersionUID = 1L;
 
-    NoBrokerException(Plan plan, long seconds, String doing) {
+    NoBrokerException(Plan plan, String doing) {
         super(plan.file() + ": kafka.bootstrap.servers: no broker answers at "
-                + plan.kafka().get("bootstrap.servers") + " within " + seconds + " seconds (" + doing + ")");
+                + plan.kafka().get("bootstrap.servers") + " (" + doing + ")");
     }
 }
