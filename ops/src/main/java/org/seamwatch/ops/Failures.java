@@ -23,7 +23,7 @@ final class Failures {
     static final int INTERRUPTED = 130;
 
     private static final Pattern NO_NUMBER =
-            Pattern.compile("^Invalid value for option '(\\S+)' \\(.*?\\): '(.*)' is not an? (?:int|long)$");
+            Pattern.compile("^Invalid value for option '(\\S+)'(?: \\(.*?\\))?: '(.*)' is not an? (?:int|long)$");
 
     private final PrintWriter err;
     private final BooleanSupplier verbose;

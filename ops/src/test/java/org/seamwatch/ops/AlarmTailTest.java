@@ -43,7 +43,7 @@ class AlarmTailTest {
                 new Method(List.of("Moran's I"), 6, 3, 57, true),
                 new Repeat("0.1.0", "ab", "2024a"),
                 "A statistical signal is not a confirmed outbreak.");
-        return Json.write(new AlarmChange(
+        return Json.bytes(new AlarmChange(
                 1, "land/flu/2024-06-16", "land/flu", "land", "flu", Change.RAISED, 1, DAY, List.of(), null, evidence));
     }
 
