@@ -3,11 +3,13 @@ package org.seamwatch.ops;
 import java.io.PrintWriter;
 import java.util.Locale;
 import java.util.function.BooleanSupplier;
+import java.util.regex.Pattern;
 import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.config.ConfigException;
 import org.jspecify.annotations.Nullable;
 import org.seamwatch.schemas.InputException;
 import org.seamwatch.topology.replay.ResultFileException;
+import org.seamwatch.topology.service.NoBrokerException;
 import picocli.CommandLine;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.UnmatchedArgumentException;
@@ -20,6 +22,9 @@ final class Failures {
     static final int WRONG_INPUT = 2;
     static final int INTERRUPTED = 130;
 
+    private static final Pattern NO_NUMBER =
+            Pattern.compile("^Invalid value for option '(\\S+)'(?: \\(.*?\\))?: '(.*)' is not an? (?:int|long)$");
+
     private final PrintWriter err;
     private final BooleanSupplier verbose;
 
@@ -31,7 +36,7 @@ final class Failures {
     /** An option or argument is wrong. */
     int usage(ParameterException e, String[] args) {
         CommandLine command = e.getCommandLine();
-        String said = oneLine(e.getMessage());
+        String said = NO_NUMBER.matcher(oneLine(e.getMessage())).replaceFirst("$1 must be a whole number, was '$2'");
         String near = "";
         if (e instanceof UnmatchedArgumentException unmatched
                 && !unmatched.getSuggestions().isEmpty()) {
@@ -47,7 +52,7 @@ final class Failures {
             line(oneLine(e.getMessage()));
             return WRONG_INPUT;
         }
-        if (e instanceof CommandFailure || e instanceof ResultFileException) {
+        if (e instanceof CommandFailure || e instanceof ResultFileException || e instanceof NoBrokerException) {
             line(oneLine(e.getMessage()));
             trace(e);
             return FAILED;

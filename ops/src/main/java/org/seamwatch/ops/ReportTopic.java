@@ -79,8 +79,7 @@ final class ReportTopic implements AutoCloseable {
                     .next();
         } catch (ExecutionException e) {
             if (e.getCause() instanceof UnknownTopicOrPartitionException) {
-                throw new CommandFailure(
-                        "no topic " + topic + " at " + where + ": `seamwatch run` makes it at its first start", e);
+                throw new CommandFailure("no topic " + topic + " at " + where + ": it has been deleted just now", e);
             }
             throw new CommandFailure("Kafka at " + where + " cannot be used: " + reason(e), e);
         } catch (TimeoutException e) {

@@ -17,6 +17,7 @@ import org.seamwatch.schemas.record.CaseReportReader;
 import org.seamwatch.schemas.record.ReadResult;
 import org.seamwatch.topology.replay.FeedTime;
 import org.seamwatch.topology.replay.LineFile;
+import org.seamwatch.topology.service.TopicSetup;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -33,12 +34,17 @@ import picocli.CommandLine.Parameters;
             "",
             "A line that is no report is named and skipped, the others are sent, and the exit code is 2. With --history"
                     + " a report's time in the log is the greatest reportedAt so far, as in a replay; without it, the"
-                    + " present. Send history in time order, before the service writes its first clock record."
+                    + " present.",
+            "",
+            "Makes the topics that are missing, as run does. To load history: send --history first, in time order, then"
+                    + " run, whose clock records move the log's time to the present."
         })
 final class SendCommand implements Callable<Integer> {
 
     private static final int NAMED_FAULTS = 20;
     private static final Duration ORDERLY = Duration.ofDays(1);
+    private static final Duration FRESH = Duration.ofDays(1);
+    private static final int FEW = 3;
 
     private final Console console;
 
@@ -66,6 +72,7 @@ final class SendCommand implements Callable<Integer> {
     private long faults;
     private long lines;
     private long furthestBack;
+    private long old;
 
     SendCommand(Console console) {
         this.console = console;
@@ -78,6 +85,7 @@ final class SendCommand implements Callable<Integer> {
         }
         inputs.forEach(LineFile::check);
         Plan read = PlanReader.read(plan.file());
+        TopicSetup.prepare(read).forEach(console::warn);
         FeedTime time = new FeedTime(Duration.ofDays(maxGap));
         try (ReportTopic topic = ReportTopic.open(read);
                 Progress progress = new Progress(console, "send", "reports", 0)) {
@@ -109,7 +117,11 @@ final class SendCommand implements Callable<Integer> {
 
     private long timestamp(CaseReport report, ReportTopic topic, FeedTime time) {
         if (!history) {
-            return System.currentTimeMillis();
+            long now = System.currentTimeMillis();
+            if (now - report.reportedAt().toEpochMilli() > FRESH.toMillis()) {
+                old++;
+            }
+            return now;
         }
         if (!time.isBegun()) {
             warnOfTimePassed(topic.greatestTimestamp(), report.reportedAt());
@@ -144,13 +156,23 @@ final class SendCommand implements Callable<Integer> {
                     + Duration.ofMillis(furthestBack).toDays()
                     + " days before one sent earlier, and counts from that one's time on");
         }
+        if (old > FEW) {
+            console.warn(String.format(
+                    Locale.ROOT,
+                    "%,d of %,d reports are older than a day and are stamped with the present time;"
+                            + " did you mean --history?",
+                    old,
+                    sent));
+        }
         console.say(String.format(
                 Locale.ROOT,
-                "%,d reports sent to %s%s; %,d lines are no reports and were not sent",
+                "%,d %s sent to %s%s; %,d %s not sent",
                 sent,
+                sent == 1 ? "report" : "reports",
                 read.topics().prefix(),
                 Topics.CASE_REPORTS,
-                faults));
+                faults,
+                faults == 1 ? "line is no report and was" : "lines are no reports and were"));
         return faults == 0 ? Failures.DONE : Failures.WRONG_INPUT;
     }
 }

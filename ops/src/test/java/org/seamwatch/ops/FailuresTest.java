@@ -53,4 +53,12 @@ class FailuresTest {
         assertThat(fail(false, new CommandFailure("no broker answers", null))).isEqualTo(1);
         assertThat(err.toString().lines()).containsExactly("seamwatch: no broker answers");
     }
+
+    @Test
+    void shouldSayOfAnOptionWhatItMustBe() {
+        Run run = Run.of("demo", "--seed", "x");
+        assertThat(run.code()).isEqualTo(2);
+        assertThat(run.errLines())
+                .containsExactly("seamwatch: --seed must be a whole number, was 'x' (see seamwatch demo --help)");
+    }
 }

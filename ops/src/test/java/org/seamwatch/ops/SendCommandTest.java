@@ -62,7 +62,6 @@ class SendCommandTest {
     @Test
     void shouldSendHistoryUnderTheTimesOfAReplay() throws IOException {
         String topic = topic("history");
-        topics.create(topic, 2, Map.of());
         String[] lines = {
             report("a", "2024-03-01T10:00:00Z"),
             report("b", "2024-03-01T12:00:00Z"),
@@ -87,7 +86,6 @@ class SendCommandTest {
     @Test
     void shouldGiveThePresentWithoutHistory() throws IOException {
         String topic = topic("present");
-        topics.create(topic, 2, Map.of());
         long before = System.currentTimeMillis();
         assertThat(Run.of("send", "--plan", files.plan(), reports(report("a", "2024-03-01T10:00:00Z")))
                         .code())
@@ -100,7 +98,6 @@ class SendCommandTest {
     @Test
     void shouldNameLinesThatAreNoReportsAndSendTheRest() throws IOException {
         String topic = topic("faults");
-        topics.create(topic, 2, Map.of());
         Path input = reports(
                 report("a", "2024-03-01T10:00:00Z"),
                 "rubbish",
@@ -108,6 +105,7 @@ class SendCommandTest {
                 report("c", "2024-03-01T10:00:00Z"));
         Run run = Run.of("send", "--plan", files.plan(), input);
         assertThat(run.code()).isEqualTo(2);
+        assertThat(run.out()).contains("2 reports sent to faults.case-reports; 2 lines are no reports and were not");
         assertThat(run.errLines()).containsExactly(input + ":2: not-json", input + ":3: reportedAt: bad-value");
         assertThat(topics.read(topic)).hasSize(2);
     }
@@ -115,7 +113,7 @@ class SendCommandTest {
     @Test
     void shouldWarnOfHistoryBehindTheTopicsTimeOrOutOfOrder() throws IOException {
         String topic = topic("late");
-        topics.create(topic, 2, Map.of());
+        topics.create(topic, 2, Map.of("retention.ms", "-1"));
         long clock = Instant.parse("2024-05-01T00:00:00Z").toEpochMilli();
         topics.send(new ProducerRecord<>(topic, 1, clock, ClockRecord.key(), ClockRecord.value()));
         Run run = Run.of(
@@ -133,12 +131,44 @@ class SendCommandTest {
     }
 
     @Test
-    void shouldNameATopicThatIsNotThere() throws IOException {
-        topic("nowhere");
+    void shouldAskForHistoryWhereReportsAreOld() throws IOException {
+        String topic = topic("old");
+        String old = "2024-03-01T10:00:00Z";
+        Run run = Run.of(
+                "send",
+                "--plan",
+                files.plan(),
+                reports(
+                        report("a", old),
+                        report("b", old),
+                        report("c", old),
+                        report("d", old),
+                        report("e", Instant.now().toString())));
+        assertThat(run.code()).isZero();
+        assertThat(run.errLines())
+                .containsExactly("seamwatch: warning: 4 of 5 reports are older than a day and are stamped with the"
+                        + " present time; did you mean --history?");
+        assertThat(topics.read(topic)).hasSize(5);
+    }
+
+    @Test
+    void shouldMakeTheTopicsSoThatHistoryCanBeSentBeforeTheServiceRuns() throws IOException {
+        topic("first");
+        Run run = Run.of("send", "--plan", files.plan(), "--history", reports(report("a", "2024-03-01T10:00:00Z")));
+        assertThat(run.code()).as(run.err()).isZero();
+        assertThat(run.out().strip())
+                .isEqualTo("1 report sent to first.case-reports; 0 lines are no reports and were not sent");
+        assertThat(topics.topics()).contains("first.case-reports", "first.alarm-responses", "first.alarms");
+    }
+
+    @Test
+    void shouldSayThatNoBrokerAnswers() throws IOException {
+        files.plan("kafka: { bootstrap.servers: \"localhost:1\", default.api.timeout.ms: \"2000\","
+                + " request.timeout.ms: \"1000\" }\n" + PlanFiles.PLAN);
         Run run = Run.of("send", "--plan", files.plan(), reports(report("a", "2024-03-01T10:00:00Z")));
         assertThat(run.code()).isEqualTo(1);
         assertThat(run.errLines())
-                .containsExactly("seamwatch: no topic nowhere.case-reports at " + broker.bootstrapServers()
-                        + ": `seamwatch run` makes it at its first start");
+                .containsExactly("seamwatch: " + files.plan() + ": kafka.bootstrap.servers: no broker answers at"
+                        + " localhost:1 (listing topics)");
     }
 }

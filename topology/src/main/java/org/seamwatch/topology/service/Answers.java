@@ -9,16 +9,19 @@ import org.apache.kafka.common.KafkaFuture;
 import org.apache.kafka.common.errors.DisconnectException;
 import org.apache.kafka.common.errors.RetriableException;
 import org.jspecify.annotations.Nullable;
-import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.plan.Plan;
 
 /** Waits for the broker's answers, and says in one line where none comes. */
 final class Answers {
 
-    private static final long LIMIT_SECONDS = 60;
+    /** A broker that is there says so in less; one that has may take its time over the rest. */
+    static final int FIRST_SECONDS = 12;
+
+    private static final int LIMIT_SECONDS = 60;
     private static final long PAUSE_NANOS = TimeUnit.MILLISECONDS.toNanos(50);
 
     private final Plan plan;
+    private boolean answered;
 
     Answers(Plan plan) {
         this.plan = plan;
@@ -26,15 +29,18 @@ final class Answers {
 
     /** The answer to a question that is asked once. */
     <T> T of(KafkaFuture<T> answer, String doing) {
+        int limit = answered ? LIMIT_SECONDS : FIRST_SECONDS;
         try {
-            return answer.get(LIMIT_SECONDS, TimeUnit.SECONDS);
+            T value = answer.get(limit, TimeUnit.SECONDS);
+            answered = true;
+            return value;
         } catch (ExecutionException e) {
             if (isSilence(e.getCause())) {
-                throw silent(doing);
+                throw new NoBrokerException(plan, doing);
             }
             throw new IllegalStateException(doing + " failed: " + e.getCause(), e.getCause());
         } catch (TimeoutException e) {
-            throw silent(doing);
+            throw new NoBrokerException(plan, doing);
         } catch (InterruptedException e) {
             Thread.currentThread().interrupt();
             throw new IllegalStateException(doing + " was interrupted", e);
@@ -58,10 +64,5 @@ final class Answers {
 
     private static boolean isSilence(@Nullable Throwable cause) {
         return cause instanceof org.apache.kafka.common.errors.TimeoutException || cause instanceof DisconnectException;
-    }
-
-    private InputException silent(String doing) {
-        return new InputException(plan.file() + ": kafka.bootstrap.servers: no broker answers at "
-                + plan.kafka().get("bootstrap.servers") + " (" + doing + ")");
     }
 }

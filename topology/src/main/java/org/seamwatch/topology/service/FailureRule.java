@@ -23,7 +23,11 @@ final class FailureRule implements StreamsUncaughtExceptionHandler {
         failures.incrementAndGet();
         boolean passing = isPassing(error);
         stops |= !passing;
-        LOG.error("a stream thread ended, {}", passing ? "another takes its place" : "the service stops", error);
+        if (passing) {
+            LOG.warn("a stream thread ended, another takes its place: {}", error.toString());
+        } else {
+            LOG.error("a stream thread ended, the service stops", error);
+        }
         return passing ? StreamThreadExceptionResponse.REPLACE_THREAD : StreamThreadExceptionResponse.SHUTDOWN_CLIENT;
     }
 

@@ -6,16 +6,22 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Properties;
 import java.util.concurrent.CountDownLatch;
+import java.util.stream.IntStream;
 import java.util.stream.Stream;
+import org.apache.kafka.clients.consumer.Consumer;
+import org.apache.kafka.clients.consumer.ConsumerConfig;
+import org.apache.kafka.clients.consumer.KafkaConsumer;
 import org.apache.kafka.clients.producer.KafkaProducer;
 import org.apache.kafka.clients.producer.ProducerConfig;
 import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.TopicPartition;
+import org.apache.kafka.common.serialization.ByteArrayDeserializer;
 import org.apache.kafka.common.serialization.ByteArraySerializer;
 import org.apache.kafka.streams.CloseOptions;
 import org.apache.kafka.streams.KafkaStreams;
 import org.seamwatch.processors.flow.Topics;
 import org.seamwatch.processors.watch.Watch;
+import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.schemas.record.AccountingLine;
 import org.seamwatch.topology.FlowTopology;
@@ -29,12 +35,18 @@ public final class StreamsService implements AutoCloseable {
     private final Plan plan;
     private final KafkaStreams streams;
     private final FailureRule failures = new FailureRule();
+    private final RestoreCount restores = new RestoreCount();
+    private final OpenMark mark;
     private final CountDownLatch ended = new CountDownLatch(1);
 
     /** An instance that has not started. */
     public StreamsService(Watch watch) {
         plan = watch.plan();
-        streams = engine(watch);
+        Properties settings = StreamsSettings.of(plan);
+        streams = engine(watch, settings);
+        // The engine holds the lock of its folder from here on.
+        mark = OpenMark.in(StreamsSettings.stateDir(settings), applicationId());
+        streams.setGlobalStateRestoreListener(restores);
         streams.setUncaughtExceptionHandler(failures);
         streams.setStateListener((now, before) -> {
             if (now == KafkaStreams.State.ERROR || now == KafkaStreams.State.NOT_RUNNING) {
@@ -43,16 +55,23 @@ public final class StreamsService implements AutoCloseable {
         });
     }
 
-    private static KafkaStreams engine(Watch watch) {
+    private static KafkaStreams engine(Watch watch, Properties settings) {
         try {
-            return new KafkaStreams(FlowTopology.of(watch), StreamsSettings.of(watch.plan()));
+            return new KafkaStreams(FlowTopology.of(watch), settings);
         } catch (KafkaException e) {
+            if (StreamsSettings.isFolderInUse(e)) {
+                throw new InputException(watch.plan().file() + ": kafka.state.dir: the state folder "
+                        + StreamsSettings.stateDir(settings)
+                        + " is in use by another process; for a second instance on one machine set"
+                        + " kafka: { state.dir: ... } to another folder");
+            }
             throw StreamsSettings.wrong(watch.plan(), e);
         }
     }
 
     /** Starts the threads and returns; {@link #state} says when they run. */
     public void start() {
+        mark.set();
         streams.start();
     }
 
@@ -77,6 +96,16 @@ public final class StreamsService implements AutoCloseable {
         return Stream.of(Names.REPORT_CHANGES, Names.RESPONSE_CHANGES)
                 .map(changes -> applicationId() + "-" + Names.repartitionTopic(changes))
                 .toList();
+    }
+
+    /** Whether an earlier process left the local state open: the engine then rebuilds it from Kafka. */
+    public boolean isStateLeftOpen() {
+        return mark.wasSet();
+    }
+
+    /** About how many records are still to be read back into local state. */
+    public long toRestore() {
+        return restores.left();
     }
 
     /** How many stream threads have died. */
@@ -104,6 +133,27 @@ public final class StreamsService implements AutoCloseable {
                 clock);
     }
 
+    /** Asks now and then whether the broker is there; to be closed by the caller. */
+    public BrokerProbe brokerProbe() {
+        return BrokerProbe.of(plan);
+    }
+
+    /** A reader of result topics that sees committed records only and belongs to no group; to be closed by the caller. */
+    public Consumer<byte[], byte[]> resultReader() {
+        Properties properties = StreamsSettings.client(plan);
+        properties.remove(ConsumerConfig.GROUP_ID_CONFIG);
+        properties.put(ConsumerConfig.ENABLE_AUTO_COMMIT_CONFIG, "false");
+        properties.put(ConsumerConfig.ISOLATION_LEVEL_CONFIG, "read_committed");
+        return new KafkaConsumer<>(properties, new ByteArrayDeserializer(), new ByteArrayDeserializer());
+    }
+
+    /** The partitions of alarms. */
+    public List<TopicPartition> alarmPartitions() {
+        return IntStream.range(0, plan.topics().seriesPartitions())
+                .mapToObj(p -> new TopicPartition(plan.topics().prefix() + Topics.ALARMS, p))
+                .toList();
+    }
+
     private List<TopicPartition> inputPartitions() {
         List<TopicPartition> partitions = new ArrayList<>();
         for (String topic : inputTopics()) {
@@ -123,8 +173,12 @@ public final class StreamsService implements AutoCloseable {
     /** Stops the threads, commits, and leaves the group at once, so that others take over in seconds. */
     @Override
     public void close() {
-        streams.close(CloseOptions.groupMembershipOperation(CloseOptions.GroupMembershipOperation.LEAVE_GROUP)
-                .withTimeout(CLOSE_LIMIT));
+        boolean done =
+                streams.close(CloseOptions.groupMembershipOperation(CloseOptions.GroupMembershipOperation.LEAVE_GROUP)
+                        .withTimeout(CLOSE_LIMIT));
+        if (done && !failures.stops()) {
+            mark.clear();
+        }
         ended.countDown();
     }
 }

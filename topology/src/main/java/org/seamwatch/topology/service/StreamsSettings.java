@@ -9,6 +9,7 @@ import org.apache.kafka.clients.producer.ProducerConfig;
 import org.apache.kafka.common.KafkaException;
 import org.apache.kafka.common.config.TopicConfig;
 import org.apache.kafka.streams.StreamsConfig;
+import org.apache.kafka.streams.errors.StreamsException;
 import org.seamwatch.schemas.InputException;
 import org.seamwatch.schemas.plan.Plan;
 import org.seamwatch.topology.LogTime;
@@ -85,6 +86,18 @@ public final class StreamsSettings {
             cause = deeper;
         }
         return new InputException(plan.file() + ": kafka: " + cause.getMessage());
+    }
+
+    /** Whether the engine could not start because another holds its state folder; it says so in words only. */
+    static boolean isFolderInUse(KafkaException e) {
+        return e instanceof StreamsException
+                && e.getMessage() != null
+                && e.getMessage().startsWith("Unable to initialize state");
+    }
+
+    /** The folder of local state. */
+    static Path stateDir(Properties settings) {
+        return Path.of(String.valueOf(settings.get(StreamsConfig.STATE_DIR_CONFIG)));
     }
 
     private static Path defaultStateDir() {

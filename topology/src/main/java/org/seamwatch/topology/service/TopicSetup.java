@@ -1,5 +1,6 @@
 package org.seamwatch.topology.service;
 
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.HashMap;
 import java.util.List;
@@ -40,11 +41,16 @@ public final class TopicSetup {
      * Makes sure that every topic of the plan is there and as it must be.
      *
      * @return warnings, one line each
-     * @throws InputException where plan and topics do not fit, or the plan's properties are no use, or no broker answers
+     * @throws InputException where plan and topics do not fit, or the plan's properties are no use
+     * @throws NoBrokerException where no broker answers
      */
     public static List<String> prepare(Plan plan) {
-        try (Admin admin = admin(plan)) {
+        Admin admin = admin(plan);
+        try {
             return new TopicSetup(admin, plan).prepare();
+        } finally {
+            // What has had no answer by now is not waited for.
+            admin.close(Duration.ZERO);
         }
     }
 

@@ -134,7 +134,7 @@ class TopicSetupTest {
                 .kafka("request.timeout.ms", 500)
                 .plan();
         assertThatThrownBy(() -> TopicSetup.prepare(plan))
-                .isInstanceOf(InputException.class)
+                .isInstanceOf(NoBrokerException.class)
                 .hasMessageContaining("kafka.bootstrap.servers: no broker answers at 127.0.0.1:1");
     }
 }
