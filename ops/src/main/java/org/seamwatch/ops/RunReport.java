@@ -24,6 +24,9 @@ final class RunReport {
     private static final Duration BETWEEN_PROBES = Duration.ofSeconds(10);
     private static final Duration BETWEEN_RESTORE_LINES = Duration.ofSeconds(30);
 
+    /** Fewer are read back before the line is read. */
+    private static final long WORTH_A_LINE = 1_000;
+
     /** Pauses before the first counts; the last one stands for all that follow. */
     private static final List<Duration> PAUSES =
             List.of(Duration.ofSeconds(10), Duration.ofMinutes(1), Duration.ofMinutes(10));
@@ -35,6 +38,9 @@ final class RunReport {
 
         /** About how many records are still to be read back into local state. */
         long toRestore();
+
+        /** How many have been read back since the start. */
+        long restored();
 
         /** The accounts; throws {@link InvalidStateStoreException} while partitions move. */
         List<AccountingLine> accounting();
@@ -52,6 +58,11 @@ final class RunReport {
                 }
 
                 @Override
+                public long restored() {
+                    return service.restored();
+                }
+
+                @Override
                 public List<AccountingLine> accounting() {
                     return service.accounting();
                 }
@@ -62,7 +73,7 @@ final class RunReport {
     private final RunLog log;
     private final Subject subject;
     private final BooleanSupplier broker;
-    private boolean restoring;
+    private long restoredBefore;
     private boolean running;
     private Instant nextRestoreLine = Instant.MIN;
     private Instant nextProbe = Instant.MIN;
@@ -95,9 +106,8 @@ final class RunReport {
 
     private void restoring(Instant now) {
         long left = subject.toRestore();
-        if (left > 0 && !now.isBefore(nextRestoreLine)) {
+        if (left >= WORTH_A_LINE && !now.isBefore(nextRestoreLine)) {
             log.say(String.format(Locale.ROOT, "rebuilding local state from Kafka: about %,d records to go", left));
-            restoring = true;
             nextRestoreLine = now.plus(BETWEEN_RESTORE_LINES);
         }
     }
@@ -106,12 +116,17 @@ final class RunReport {
         boolean before = running;
         running = subject.state() == KafkaStreams.State.RUNNING;
         if (running && !before) {
-            log.say(restoring ? "local state is rebuilt; running" : "running");
-            restoring = false;
+            long restored = subject.restored();
+            log.say((restored > restoredBefore ? readBack(restored - restoredBefore) : "") + "running");
+            restoredBefore = restored;
             nextRestoreLine = Instant.MIN;
         } else if (before && subject.state() == KafkaStreams.State.REBALANCING) {
             log.say("partitions are being shared out anew");
         }
+    }
+
+    private static String readBack(long records) {
+        return String.format(Locale.ROOT, "%,d records of local state have been read back from Kafka; ", records);
     }
 
     private void probe(Instant now) {

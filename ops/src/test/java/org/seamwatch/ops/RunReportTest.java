@@ -47,6 +47,7 @@ class RunReportTest {
     private static final class Engine implements RunReport.Subject {
         private KafkaStreams.State state = KafkaStreams.State.REBALANCING;
         private long left;
+        private long restored;
         private boolean moving;
         private List<AccountingLine> lines = List.of();
 
@@ -58,6 +59,11 @@ class RunReportTest {
         @Override
         public long toRestore() {
             return left;
+        }
+
+        @Override
+        public long restored() {
+            return restored;
         }
 
         @Override
@@ -86,10 +92,18 @@ class RunReportTest {
         assertThat(after(Duration.ofSeconds(29)))
                 .containsExactly("2024-03-01T10:00:30Z  rebuilding local state from Kafka: about 9,000 records to go");
         engine.left = 0;
+        engine.restored = 12_345;
         engine.state = KafkaStreams.State.RUNNING;
         assertThat(after(Duration.ofSeconds(1)))
-                .containsExactly("2024-03-01T10:00:31Z  local state is rebuilt; running");
+                .containsExactly("2024-03-01T10:00:31Z  12,345 records of local state have been read back from Kafka;"
+                        + " running");
         assertThat(after(Duration.ofSeconds(1))).isEmpty();
+        engine.state = KafkaStreams.State.REBALANCING;
+        engine.left = 2;
+        assertThat(after(Duration.ofMinutes(1)))
+                .containsExactly("2024-03-01T10:01:32Z  partitions are being shared out anew");
+        engine.state = KafkaStreams.State.RUNNING;
+        assertThat(after(Duration.ofSeconds(1))).startsWith("2024-03-01T10:01:33Z  running");
     }
 
     @Test

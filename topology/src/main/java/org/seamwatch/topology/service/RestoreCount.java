@@ -2,6 +2,7 @@ package org.seamwatch.topology.service;
 
 import java.util.Map;
 import java.util.concurrent.ConcurrentHashMap;
+import java.util.concurrent.atomic.LongAdder;
 import org.apache.kafka.common.TopicPartition;
 import org.apache.kafka.streams.processor.StateRestoreListener;
 
@@ -9,6 +10,7 @@ import org.apache.kafka.streams.processor.StateRestoreListener;
 final class RestoreCount implements StateRestoreListener {
 
     private final Map<TopicPartition, Long> left = new ConcurrentHashMap<>();
+    private final LongAdder restored = new LongAdder();
 
     @Override
     public void onRestoreStart(TopicPartition partition, String store, long from, long to) {
@@ -17,6 +19,7 @@ final class RestoreCount implements StateRestoreListener {
 
     @Override
     public void onBatchRestored(TopicPartition partition, String store, long reached, long count) {
+        restored.add(count);
         left.computeIfPresent(partition, (key, before) -> Math.max(0, before - count));
     }
 
@@ -28,6 +31,11 @@ final class RestoreCount implements StateRestoreListener {
     @Override
     public void onRestoreSuspended(TopicPartition partition, String store, long total) {
         left.remove(partition);
+    }
+
+    /** How many have been read back since the start. */
+    long restored() {
+        return restored.sum();
     }
 
     long left() {

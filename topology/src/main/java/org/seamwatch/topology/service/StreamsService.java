@@ -108,6 +108,11 @@ public final class StreamsService implements AutoCloseable {
         return restores.left();
     }
 
+    /** How many records have been read back into local state since the start. */
+    public long restored() {
+        return restores.restored();
+    }
+
     /** How many stream threads have died. */
     public long failures() {
         return failures.failures();

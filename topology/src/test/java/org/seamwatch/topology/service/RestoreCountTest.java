@@ -17,6 +17,7 @@ class RestoreCountTest {
         assertThat(count.left()).isEqualTo(150);
         count.onBatchRestored(a, "a", 40, 30);
         assertThat(count.left()).isEqualTo(120);
+        assertThat(count.restored()).isEqualTo(30);
         count.onRestoreEnd(b, "b", 50);
         assertThat(count.left()).isEqualTo(70);
         count.onRestoreSuspended(a, "a", 30);
