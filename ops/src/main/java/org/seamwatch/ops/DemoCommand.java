@@ -56,22 +56,24 @@ final class DemoCommand implements Callable<Integer> {
 
     @Override
     public Integer call() throws Exception {
-        if (out != null) {
-            ResultFiles.prepare(out);
-            return demo(out);
-        }
-        try (DemoState folder = DemoState.make("seamwatch-demo")) {
-            return demo(folder.folder());
+        // The stop is closed last: a signal ends the process as soon as it is.
+        try (DemoStop stop = new DemoStop(console)) {
+            if (out != null) {
+                ResultFiles.prepare(out);
+                return demo(out, stop);
+            }
+            try (DemoState folder = DemoState.make("seamwatch-demo")) {
+                return demo(folder.folder(), stop);
+            }
         }
     }
 
-    private int demo(Path folder) throws Exception {
+    private int demo(Path folder, DemoStop stop) throws Exception {
         console.say("Northmarch is made up, and so is everything in it.");
         Scenario scenario = Scenario.of(ScenarioOptions.defaults().withSeed(seed));
         new ScenarioWriter(scenario).write(folder);
         Plans plans = Plans.read(folder.resolve(ScenarioWriter.PLAN));
-        try (DemoStop stop = new DemoStop(console);
-                DemoRun run = DemoRun.start(console, scenario, plans, stop)) {
+        try (DemoRun run = DemoRun.start(console, scenario, plans, stop)) {
             try {
                 if (once) {
                     run.everything();
