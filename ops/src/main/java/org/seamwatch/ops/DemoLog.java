@@ -12,6 +12,7 @@ import org.seamwatch.fixtures.scenario.Scenario;
 import org.seamwatch.processors.flow.Topics;
 import org.seamwatch.schemas.plan.TopicsPlan;
 import org.seamwatch.schemas.record.ClockRecord;
+import org.seamwatch.topology.replay.ReportKey;
 
 /**
  * A scenario's feed as it goes into the input topics, in time order, with a clock record in every partition of both at
@@ -94,7 +95,7 @@ final class DemoLog {
     private ProducerRecord<byte[], byte[]> report(FeedRecord record) {
         String id = record.key();
         byte[] key = id == null ? null : Utils.utf8(id);
-        int partition = key == null ? 0 : Utils.toPositive(Utils.murmur2(key)) % topics.partitions();
+        int partition = key == null ? 0 : ReportKey.partition(key, topics.partitions());
         return new ProducerRecord<>(
                 topics.prefix() + Topics.CASE_REPORTS,
                 partition,

@@ -1,10 +1,8 @@
 package org.seamwatch.processors.intake;
 
-import java.security.MessageDigest;
-import java.security.NoSuchAlgorithmException;
 import java.util.Arrays;
-import java.util.HexFormat;
 import org.jspecify.annotations.Nullable;
+import org.seamwatch.schemas.Sha256;
 
 /**
  * A record that could not be used.
@@ -50,16 +48,7 @@ public record Rejection(String topic, int partition, long offset, long timestamp
             if (whole == null || whole.length <= KEPT) {
                 return new Cut(whole, null, null);
             }
-            return new Cut(Arrays.copyOf(whole, KEPT), whole.length, hash(whole));
-        }
-
-        private static String hash(byte[] bytes) {
-            try {
-                return HexFormat.of()
-                        .formatHex(MessageDigest.getInstance("SHA-256").digest(bytes));
-            } catch (NoSuchAlgorithmException e) {
-                throw new IllegalStateException("every Java platform has SHA-256", e);
-            }
+            return new Cut(Arrays.copyOf(whole, KEPT), whole.length, Sha256.hex(whole));
         }
     }
 }

@@ -1,10 +1,8 @@
 package org.seamwatch.processors.watch;
 
 import java.nio.charset.StandardCharsets;
-import java.security.MessageDigest;
-import java.security.NoSuchAlgorithmException;
-import java.util.HexFormat;
 import java.util.List;
+import org.seamwatch.schemas.Sha256;
 import org.seamwatch.schemas.geography.Geography;
 import org.seamwatch.schemas.plan.GeographyPlan;
 import org.seamwatch.schemas.plan.Plan;
@@ -76,11 +74,6 @@ final class PlanHash {
     }
 
     private static String sha256(String text) {
-        try {
-            byte[] hash = MessageDigest.getInstance("SHA-256").digest(text.getBytes(StandardCharsets.UTF_8));
-            return HexFormat.of().formatHex(hash);
-        } catch (NoSuchAlgorithmException e) {
-            throw new IllegalStateException("every Java platform has SHA-256", e);
-        }
+        return Sha256.hex(text.getBytes(StandardCharsets.UTF_8));
     }
 }

@@ -3,12 +3,12 @@ package org.seamwatch.schemas.geography;
 import java.nio.ByteBuffer;
 import java.nio.charset.StandardCharsets;
 import java.security.MessageDigest;
-import java.security.NoSuchAlgorithmException;
 import java.util.HexFormat;
 import java.util.List;
 import org.jspecify.annotations.Nullable;
 import org.locationtech.jts.io.ByteOrderValues;
 import org.locationtech.jts.io.WKBWriter;
+import org.seamwatch.schemas.Sha256;
 
 /** Hash of what a geography says, whatever the order, spacing and further properties of its file. */
 final class GeographyHash {
@@ -19,7 +19,7 @@ final class GeographyHash {
 
     /** SHA-256 over id, name, population and shape of each region, each with its length before it. */
     static String sha256(List<Region> sorted) {
-        MessageDigest digest = digest();
+        MessageDigest digest = Sha256.start();
         WKBWriter shapes = new WKBWriter(DIMENSIONS, ByteOrderValues.BIG_ENDIAN);
         for (Region region : sorted) {
             add(digest, region.id().getBytes(StandardCharsets.UTF_8));
@@ -39,13 +39,5 @@ final class GeographyHash {
     private static void add(MessageDigest digest, byte[] part) {
         digest.update(ByteBuffer.allocate(Integer.BYTES).putInt(part.length).array());
         digest.update(part);
-    }
-
-    private static MessageDigest digest() {
-        try {
-            return MessageDigest.getInstance("SHA-256");
-        } catch (NoSuchAlgorithmException e) {
-            throw new IllegalStateException("every Java has SHA-256", e);
-        }
     }
 }
